@@ -1,0 +1,4 @@
+import type { Options } from "sequelize";
+
+declare const connection: Options;
+export = connection;

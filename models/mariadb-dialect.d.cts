@@ -1,0 +1,2 @@
+declare const dialectModule: object;
+export = dialectModule;
