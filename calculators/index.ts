@@ -1,0 +1,14 @@
+import type { Calculator, Operation } from "./schema";
+
+/** Every calculator, in the order of the job. Pages, API, OpenAPI, short links and tests read this list. */
+export const calculators: readonly Calculator[] = [];
+
+/** Every operation of the API by its path under /api/v1. */
+export const operations: ReadonlyMap<string, Operation> = new Map(
+  calculators.flatMap((calculator) => calculator.operations.map((operation) => [operation.path, operation] as const)),
+);
+
+/** The calculator that an operation belongs to. */
+export function calculatorOf(path: string): Calculator | undefined {
+  return calculators.find((calculator) => calculator.operations.some((operation) => operation.path === path));
+}

@@ -1,0 +1,107 @@
+import Fraction from "fraction.js";
+import type { LengthUnit } from "./length";
+import { builtFraction, kindOf, unitOf } from "./length-characters";
+import { LengthError } from "./length-error";
+
+/** A typed length cut into the few words it can have. `whole` tells `28` from `28.0`, since only a whole number can carry a fraction. */
+export type LengthToken =
+  | { kind: "number"; value: Fraction; whole: boolean; text: string }
+  | { kind: "fraction"; value: Fraction }
+  | { kind: "unit"; unit: LengthUnit }
+  | { kind: "slash" }
+  | { kind: "dash" };
+
+/** `tokens`, and `steps`: how many characters were looked at, so that a test can hold the reader to one pass. */
+export interface TokenizedLength {
+  tokens: LengthToken[];
+  steps: number;
+}
+
+/**
+ * Cuts a text into tokens in one pass, left to right, never going back.
+ *
+ * @throws LengthError `unexpected-text`, `sign`, or `two-readings` for a comma that may part thousands or decimals.
+ */
+export function tokenizeLength(text: string): TokenizedLength {
+  const characters = Array.from(text);
+  const tokens: LengthToken[] = [];
+  let position = 0;
+  let steps = 0;
+
+  function kindHere() {
+    steps += 1;
+    const character = characters[position];
+    return character === undefined ? "end" : kindOf(character);
+  }
+
+  function readNumber() {
+    const groups: string[] = [""];
+    const separators: string[] = [];
+    for (let kind = kindHere(); kind === "digit" || kind === "point" || kind === "comma"; kind = kindHere()) {
+      const character = characters[position]!;
+      if (kind === "digit") groups[groups.length - 1] += character;
+      else {
+        separators.push(character);
+        groups.push("");
+      }
+      position += 1;
+    }
+    tokens.push(numberToken(groups, separators));
+  }
+
+  function readWord() {
+    let word = "";
+    while (kindHere() === "letter") {
+      word += characters[position];
+      position += 1;
+    }
+    const unit = unitOf(word);
+    if (unit === undefined) throw new LengthError("unexpected-text", { found: word });
+    tokens.push({ kind: "unit", unit });
+    if (kindHere() === "point") position += 1; // `ft.` and `in.` end in a stop
+  }
+
+  for (let kind = kindHere(); kind !== "end"; kind = kindHere()) {
+    const character = characters[position]!;
+    if (kind === "digit" || kind === "point" || kind === "comma") readNumber();
+    else if (kind === "letter") readWord();
+    else {
+      position += 1;
+      if (kind === "fraction") tokens.push({ kind: "fraction", value: new Fraction(...builtFraction(character)) });
+      else if (kind === "slash" || kind === "dash") tokens.push({ kind });
+      else if (kind === "inch") tokens.push({ kind: "unit", unit: "in" });
+      else if (kind === "feet") {
+        const doubled = kindHere() === "feet"; // two single quotes are the inch mark
+        if (doubled) position += 1;
+        tokens.push({ kind: "unit", unit: doubled ? "in" : "ft" });
+      } else if (kind === "plus") throw new LengthError("sign", {});
+      else if (kind !== "space") throw new LengthError("unexpected-text", { found: character });
+    }
+  }
+  return { tokens, steps };
+}
+
+/** Digits with their separators: `.` is the decimal point; `,` is one only where it cannot part thousands. */
+function numberToken(groups: string[], separators: string[]): LengthToken {
+  const written = groups.reduce((text, group, index) => text + separators[index - 1] + group);
+  const number = (text: string, whole: boolean): LengthToken => ({ kind: "number", value: new Fraction(text), whole, text });
+  if (groups.every((group) => group === "")) throw new LengthError("unexpected-text", { found: written });
+  const [head = "", ...rest] = groups;
+  if (separators.length === 0) return number(head, true);
+
+  const partsThousands = head.length >= 1 && head.length <= 3 && !head.startsWith("0");
+  if (separators.length === 1) {
+    const tail = rest[0] ?? "";
+    const decimal = `${head || "0"}.${tail || "0"}`;
+    const ambiguous = separators[0] === "," && partsThousands && tail.length === 3;
+    if (ambiguous) throw new LengthError("two-readings", { first: head + tail, second: decimal });
+    return number(decimal, false);
+  }
+
+  const decimals = separators.at(-1) === "." ? (rest.at(-1) ?? "") : null;
+  const thousands = decimals === null ? rest : rest.slice(0, -1);
+  const commas = decimals === null ? separators : separators.slice(0, -1);
+  const grouped = partsThousands && commas.every((mark) => mark === ",") && thousands.every((group) => group.length === 3);
+  if (!grouped) throw new LengthError("unexpected-text", { found: written });
+  return number(head + thousands.join("") + (decimals === null ? "" : `.${decimals || "0"}`), decimals === null);
+}

@@ -1,0 +1,5 @@
+export { calculatorInput, flagField, lengthField, numberField } from "./fields";
+export { CalculationError, issuesOf, pointerTo, type Issue } from "./issue";
+export { lengthAnswer, measure, type LengthAnswer } from "./measure";
+export { defineOperation, type Calculator, type Caution, type Operation, type Source, type SourceStatus, type WorkedExample } from "./operation";
+export { inputFromQuery, queryFromInput } from "./query";

@@ -1,0 +1,48 @@
+/**
+ * English has no prefix in its addresses, Spanish has /es: `/calculators/corner` is served by `app/[locale]` as
+ * `/en/calculators/corner`. Content-Security-Policy is not here: static pages get theirs after the build (per-page
+ * hashes, scripts/lib/csp.mjs), dynamic pages from proxy.ts.
+ */
+
+const reserved = "api|_next|en|es|fonts|icons";
+
+/** @type {import("next").NextConfig} */
+const config = {
+  output: "standalone",
+  distDir: process.env.NEXT_DIST_DIR ?? ".next",
+  poweredByHeader: false,
+  reactStrictMode: true,
+  serverExternalPackages: ["sequelize", "mariadb", "pino"],
+  async rewrites() {
+    return {
+      beforeFiles: [],
+      afterFiles: [
+        { source: "/", destination: "/en" },
+        { source: `/:path((?!(?:${reserved})(?:/|$))[^.]*)`, destination: "/en/:path" },
+      ],
+      fallback: [],
+    };
+  },
+  async redirects() {
+    return [
+      { source: "/en", destination: "/", permanent: true },
+      { source: "/en/:path*", destination: "/:path*", permanent: true },
+    ];
+  },
+  async headers() {
+    return [
+      {
+        source: "/:path*",
+        headers: [
+          { key: "X-Content-Type-Options", value: "nosniff" },
+          { key: "X-Frame-Options", value: "DENY" },
+          { key: "Referrer-Policy", value: "strict-origin-when-cross-origin" },
+          { key: "Permissions-Policy", value: "camera=(), microphone=(), geolocation=(), payment=()" },
+          { key: "Cross-Origin-Opener-Policy", value: "same-origin" },
+        ],
+      },
+    ];
+  },
+};
+
+export default config;
