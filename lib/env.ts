@@ -3,7 +3,7 @@ import { z } from "zod";
 
 const unset = (value: unknown) => (value === "" ? undefined : value);
 const text = z.preprocess(unset, z.string().optional());
-const needed = (address: z.ZodType<string>) => z.preprocess(unset, z.string({ error: "is missing" }).pipe(address));
+const needed = (address: z.ZodType<string, string>) => z.preprocess(unset, z.string({ error: "is missing" }).pipe(address));
 const whole = (fallback: number, least: number, most: number) =>
   z.preprocess(unset, z.coerce.number().int().min(least).max(most).default(fallback));
 

@@ -1,5 +1,5 @@
 import "server-only";
-import { CreationOptional, DataTypes, InferAttributes, InferCreationAttributes, Model, Sequelize } from "sequelize";
+import { type CreationOptional, DataTypes, type InferAttributes, type InferCreationAttributes, Model, type Sequelize } from "sequelize";
 
 /** A calculation kept under a short address so that it can be sent to a phone; deleted a year after it was last opened. */
 export class ShortLink extends Model<InferAttributes<ShortLink>, InferCreationAttributes<ShortLink>> {

@@ -1,0 +1,50 @@
+import { createHash } from "node:crypto";
+import { existsSync, readFileSync, writeFileSync } from "node:fs";
+import path from "node:path";
+import { diskFull, Failure } from "./failure.mjs";
+import { run } from "./run.mjs";
+
+const readJson = (file) => JSON.parse(readFileSync(file, "utf8"));
+
+/** Whether node_modules holds exactly what package-lock.json names for this machine. */
+export function packagesCurrent(root) {
+  const lockFile = path.join(root, "package-lock.json");
+  const stampFile = path.join(root, "node_modules", ".sillwright-lock");
+  const hiddenFile = path.join(root, "node_modules", ".package-lock.json"); // npm's own list, written when an install is complete
+  if (!existsSync(hiddenFile)) return false;
+  const hash = createHash("sha256").update(readFileSync(lockFile)).digest("hex");
+  if (existsSync(stampFile) && readFileSync(stampFile, "utf8") === hash) return true;
+  const wanted = readJson(lockFile).packages;
+  const present = readJson(hiddenFile).packages;
+  const same = Object.entries(wanted).every(([name, { version, optional, link }]) => {
+    if (name === "" || link) return true;
+    return present[name] ? present[name].version === version : Boolean(optional);
+  });
+  if (same) writeFileSync(stampFile, hash);
+  return same;
+}
+
+/** Installs the packages of package-lock.json unless they are there. @throws Failure that says what to do. */
+export async function ensurePackages(root, { execute = run } = {}) {
+  if (packagesCurrent(root)) return "already here";
+  // Playwright must not fetch a browser of its own: the tests use the distribution's Chromium.
+  const env = { ...process.env, PLAYWRIGHT_SKIP_BROWSER_DOWNLOAD: "1", NODE_ENV: "development" };
+  const { code, output } = await execute("npm", ["ci", "--no-audit", "--no-fund"], { cwd: root, env }).catch((error) => {
+    if (error.code === "ENOENT") throw new Failure("npm is not on this machine: install it with Node (nodejs.org) and start again.");
+    throw error;
+  });
+  if (code !== 0) throw packagesFailure(output, root);
+  packagesCurrent(root);
+  return "installed";
+}
+
+/** The sentence for what `npm ci` wrote when it failed. */
+export function packagesFailure(output, root) {
+  const full = diskFull({ message: output }, root);
+  if (full) return full;
+  if (/ENOTFOUND|EAI_AGAIN|ECONNREFUSED|ECONNRESET|ETIMEDOUT|ENETUNREACH|network/i.test(output))
+    return new Failure("The npm registry cannot be reached: connect this machine to the internet (or set npm's registry or proxy) and start again.", { details: output });
+  if (/EACCES|EPERM/.test(output))
+    return new Failure(`npm may not write to ${root}/node_modules: make that folder yours (chown) and start again.`, { details: output });
+  return new Failure("npm ci failed: its last lines above say why; put that right and start again.", { details: output });
+}
