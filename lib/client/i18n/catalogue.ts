@@ -1,0 +1,55 @@
+import enAnchors from "../messages/en/anchors.json";
+import enCautions from "../messages/en/cautions.json";
+import enCommon from "../messages/en/common.json";
+import enConversions from "../messages/en/conversions.json";
+import enCorner from "../messages/en/corner.json";
+import enErrors from "../messages/en/errors.json";
+import enHome from "../messages/en/home.json";
+import enInset from "../messages/en/inset.json";
+import enLegal from "../messages/en/legal.json";
+import enSquareness from "../messages/en/squareness.json";
+import esAnchors from "../messages/es/anchors.json";
+import esCautions from "../messages/es/cautions.json";
+import esCommon from "../messages/es/common.json";
+import esConversions from "../messages/es/conversions.json";
+import esCorner from "../messages/es/corner.json";
+import esErrors from "../messages/es/errors.json";
+import esHome from "../messages/es/home.json";
+import esInset from "../messages/es/inset.json";
+import esLegal from "../messages/es/legal.json";
+import esSquareness from "../messages/es/squareness.json";
+import type { Locale } from "./locales";
+
+export const namespaces = ["common", "cautions", "errors", "home", "legal", "squareness", "corner", "inset", "anchors", "conversions"] as const;
+export type Namespace = (typeof namespaces)[number];
+
+/** A namespace's messages as written: sentences in ICU MessageFormat under nested keys. */
+export type MessageTree = { readonly [key: string]: string | MessageTree };
+
+/** Every message file. Server only by its size: a browser is given compiled messages of the namespaces its page needs. */
+export const catalogue: Readonly<Record<Locale, Readonly<Record<Namespace, MessageTree>>>> = {
+  en: {
+    common: enCommon,
+    cautions: enCautions,
+    errors: enErrors,
+    home: enHome,
+    legal: enLegal,
+    squareness: enSquareness,
+    corner: enCorner,
+    inset: enInset,
+    anchors: enAnchors,
+    conversions: enConversions,
+  },
+  es: {
+    common: esCommon,
+    cautions: esCautions,
+    errors: esErrors,
+    home: esHome,
+    legal: esLegal,
+    squareness: esSquareness,
+    corner: esCorner,
+    inset: esInset,
+    anchors: esAnchors,
+    conversions: esConversions,
+  },
+};
