@@ -1,4 +1,4 @@
-import Fraction from "fraction.js";
+import type Fraction from "fraction.js";
 import { Length, type LengthUnit } from "./length";
 import { LengthError } from "./length-error";
 import { tokenizeLength, type LengthToken } from "./length-tokens";

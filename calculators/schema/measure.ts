@@ -1,5 +1,5 @@
 import { z } from "zod";
-import { Length, printLength, roundLength, type LengthStyle, type Precision } from "../length";
+import { type Length, printLength, roundLength, type LengthStyle, type Precision } from "../length";
 
 /** How every length is answered. `in`, `mm` and `exact` are unrounded; `text` is rounded to the precision asked for. */
 export const lengthAnswer = z
