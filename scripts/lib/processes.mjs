@@ -1,0 +1,151 @@
+import { spawn } from "node:child_process";
+import { closeSync, existsSync, mkdirSync, openSync, readdirSync, readFileSync, rmSync, statSync, writeFileSync } from "node:fs";
+import path from "node:path";
+import { setTimeout as pause } from "node:timers/promises";
+import { Failure } from "./failure.mjs";
+
+/** When a process began, in the kernel's ticks since boot: with the pid it names one process and no later one. */
+function beginning(pid) {
+  try {
+    const stat = readFileSync(`/proc/${pid}/stat`, "utf8");
+    const fields = stat.slice(stat.lastIndexOf(")") + 2).split(" "); // the name before it may hold spaces
+    return fields[0] === "Z" ? undefined : `${readFileSync("/proc/sys/kernel/random/boot_id", "utf8").trim()} ${fields[19]}`;
+  } catch {
+    return undefined;
+  }
+}
+
+/** What identifies a process after we are gone; kept in a file under the data folder. */
+export const identity = (pid, more = {}) => ({ pid, began: beginning(pid), ...more });
+
+/** Whether the process that was written down is still the one that runs under this pid. */
+export const isAlive = ({ pid, began }) => began !== undefined && beginning(pid) === began;
+
+function signalGroup(pid, signal) {
+  try {
+    process.kill(-pid, signal);
+  } catch {
+    try {
+      process.kill(pid, signal);
+    } catch {
+      // It has ended.
+    }
+  }
+}
+
+/** Asks the process to end, waits, and ends it by force when it has not. */
+async function end(record, within) {
+  signalGroup(record.pid, "SIGTERM");
+  for (const until = Date.now() + within; isAlive(record) && Date.now() < until; ) await pause(20);
+  if (!isAlive(record)) return;
+  signalGroup(record.pid, "SIGKILL");
+  for (const until = Date.now() + 5_000; isAlive(record) && Date.now() < until; ) await pause(20);
+}
+
+const tail = (file, lines = 25) => {
+  try {
+    return readFileSync(file, "utf8").trimEnd().split("\n").slice(-lines).join("\n");
+  } catch {
+    return "";
+  }
+};
+
+/**
+ * Starts a long-running program with a log file and a record of its pid, in a session of its own: a Ctrl-C meant for us does not
+ * reach it, so that we can end the site before its database.
+ */
+export function startService({ name, command, args, env = process.env, cwd, runDir, logDir, within = 10_000, leftovers = [] }) {
+  mkdirSync(runDir, { recursive: true });
+  mkdirSync(logDir, { recursive: true });
+  const logFile = path.join(logDir, `${name}.log`);
+  const tooLong = existsSync(logFile) && statSync(logFile).size > 5_000_000;
+  const log = openSync(logFile, tooLong ? "w" : "a", 0o600);
+  const child = spawn(command, args, { cwd, env, detached: true, stdio: ["ignore", log, log] });
+  closeSync(log);
+  const recordFile = path.join(runDir, `${name}.json`);
+  const record = identity(child.pid ?? 0, { leftovers });
+  if (child.pid) writeFileSync(recordFile, JSON.stringify(record));
+  const service = { name, pid: child.pid, logFile, ended: false, stopping: false, tail: () => tail(logFile) };
+  service.exited = new Promise((resolve) => {
+    const done = (reason) => {
+      service.ended = true;
+      rmSync(recordFile, { force: true });
+      resolve(reason);
+    };
+    child.once("error", (error) => done(error.message));
+    child.once("exit", (code, signal) => done(signal ? `signal ${signal}` : `code ${code}`));
+  });
+  service.stop = async () => {
+    service.stopping = true;
+    if (!service.ended) {
+      await end(record, within);
+      await service.exited;
+    }
+    for (const folder of leftovers) rmSync(folder, { recursive: true, force: true });
+  };
+  return service;
+}
+
+/** Waits until `ready` answers true. @throws Failure with the end of the service's log when it ends first or takes too long. */
+export async function untilReady(service, ready, { seconds = 60, sentence } = {}) {
+  const until = Date.now() + seconds * 1000;
+  while (Date.now() < until) {
+    if (service.ended) break;
+    if (await ready()) return;
+    await pause(50);
+  }
+  const how = service.ended ? `ended (${await service.exited})` : `did not answer within ${seconds} s`;
+  throw new Failure(sentence ?? `${service.name} ${how}: the end of its log above says why; the whole is in ${service.logFile}.`, { details: service.tail() });
+}
+
+/**
+ * Ends what an earlier start left running when it was killed. A pid is only believed when the process under it is the very one
+ * that was written down.
+ */
+export async function endLeftovers(runDir) {
+  if (!existsSync(runDir)) return "nothing left from before";
+  const names = readdirSync(runDir).filter((file) => file.endsWith(".json") && file !== "owner.json");
+  // The site goes first and the database last, as in a clean stop.
+  const order = ["site", "bridge", "redis", "mariadb"];
+  names.sort((a, b) => order.findIndex((name) => a.startsWith(name)) - order.findIndex((name) => b.startsWith(name)));
+  const ended = [];
+  for (const file of names) {
+    const recordFile = path.join(runDir, file);
+    let record;
+    try {
+      record = JSON.parse(readFileSync(recordFile, "utf8"));
+    } catch {
+      record = { pid: 0, leftovers: [] }; // cut short by the kill
+    }
+    if (isAlive(record)) {
+      await end(record, 20_000);
+      ended.push(file.slice(0, -5));
+    }
+    for (const folder of record.leftovers ?? []) rmSync(folder, { recursive: true, force: true });
+    rmSync(recordFile, { force: true });
+  }
+  return ended.length ? `ended ${ended.join(", ")} left by a start that was killed` : "nothing left from before";
+}
+
+/** Makes this process the only one that works in `runDir`. @throws Failure when another does. */
+export function own(runDir, sentence) {
+  mkdirSync(runDir, { recursive: true });
+  const file = path.join(runDir, "owner.json");
+  for (let attempt = 0; attempt < 3; attempt += 1) {
+    try {
+      writeFileSync(file, JSON.stringify(identity(process.pid)), { flag: "wx" });
+      return () => rmSync(file, { force: true });
+    } catch (error) {
+      if (error.code !== "EEXIST") throw error;
+      let record = { pid: 0 };
+      try {
+        record = JSON.parse(readFileSync(file, "utf8"));
+      } catch {
+        // Cut short or just removed: taken over below.
+      }
+      if (isAlive(record)) throw new Failure(sentence(record.pid));
+      rmSync(file, { force: true });
+    }
+  }
+  throw new Failure(`${file} cannot be made ours: remove it and start again.`);
+}
