@@ -1,14 +1,21 @@
+import { fileURLToPath } from "node:url";
+
 /**
  * English has no prefix in its addresses, Spanish has /es: `/calculators/corner` is served by `app/[locale]` as
  * `/en/calculators/corner`. Content-Security-Policy is not here: static pages get theirs after the build (per-page
  * hashes, scripts/lib/csp.mjs), dynamic pages from proxy.ts.
  */
 
+// Named, since Next otherwise takes the topmost folder with a lock file for the root and nests the standalone site under it.
+const root = fileURLToPath(new URL(".", import.meta.url));
+
 const reserved = "api|_next|en|es|fonts|icons";
 
 /** @type {import("next").NextConfig} */
 const config = {
   output: "standalone",
+  outputFileTracingRoot: root,
+  turbopack: { root },
   distDir: process.env.NEXT_DIST_DIR ?? ".next",
   poweredByHeader: false,
   reactStrictMode: true,
