@@ -33,6 +33,11 @@ function applySettings({ theme, units }: DeviceSettings): void {
   else root.removeAttribute("data-units");
 }
 
+/** The choice as it stands now, for effects: a hook's first client render still sees the defaults. */
+export function deviceSettings(): DeviceSettings {
+  return snapshot();
+}
+
 function changed(): void {
   applySettings(snapshot());
   for (const listener of listeners) listener();

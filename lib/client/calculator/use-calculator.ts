@@ -1,0 +1,147 @@
+"use client";
+
+import { useDeferredValue, useEffect, useMemo, useRef, useState, useSyncExternalStore, type FocusEvent, type FormEvent } from "react";
+import type { z } from "zod";
+import type { Answered, Issue, Operation } from "@/calculators/schema";
+import { inputFromQuery } from "@/calculators/schema/query";
+import { afterFirstPaint } from "@/lib/client/core/use-length-core";
+import { localePath } from "@/lib/client/i18n/locales";
+import { useTranslate } from "@/lib/client/i18n/messages-context";
+import { precisionOf, unitOf } from "@/lib/client/settings/device-settings";
+import { deviceSettings, useDeviceSettings } from "@/lib/client/settings/use-device-settings";
+import { defaultPrecision, defaultUnit, queryFromForm, rowCount, withoutRow, type Fields, type FormState } from "./form-fields";
+import { createFormStore } from "./form-store";
+
+/** What an answer page worked out on the server: the form as sent, and its answer or issues. */
+export interface Initial<Answer> {
+  form: FormState;
+  answered: Answered<Answer>;
+}
+
+/** The core of one operation, fetched after first paint. */
+export interface LoadedOperation {
+  operation: Operation;
+  answerTo: (operation: Operation, request: unknown) => Answered<unknown>;
+}
+
+interface Options<Answer> {
+  /** The folder and page name. */
+  name: string;
+  /** Fetches the operation: `() => import("./core").then(({ loaded }) => loaded)`; called once, after first paint. */
+  load: () => Promise<LoadedOperation>;
+  /** Whether a field holds a length, so that a change of unit keeps its meaning. */
+  isLength: (name: string) => boolean;
+  /** Fields a fresh page starts with. */
+  defaults?: Fields;
+  initial?: Initial<Answer>;
+  /** Fields sent along that no input shows, or shaped otherwise: changes the input before it is asked. */
+  prepare?: (input: Record<string, unknown>) => Record<string, unknown>;
+}
+
+const nothingTyped: Answered<never> = { answer: null, issues: [] };
+
+/**
+ * A calculator's page: what is typed, in the address and here; the answer as soon as it can be worked out, in the
+ * browser; and the sentences to show beside fields. Errors show once a field is left, or when the answer is asked for.
+ */
+export function useCalculator<AnswerSchema extends z.ZodType>({ name, load, isLength, defaults, initial, prepare }: Options<z.output<AnswerSchema>>) {
+  type Answer = z.output<AnswerSchema>;
+  const t = useTranslate();
+  const { unit, precision } = useDeviceSettings();
+  const [store] = useState(() => createFormStore(initial?.form ?? { fields: defaults ?? {}, unit: defaultUnit, precision: defaultPrecision }));
+  const form = useSyncExternalStore(store.subscribe, store.get, store.getInitial);
+  const [loaded, setLoaded] = useState<LoadedOperation | null>(null);
+  const [focused, setFocused] = useState<string | null>(null);
+  const [asked, setAsked] = useState(initial !== undefined);
+  const summary = useRef<HTMLDivElement>(null);
+  const loader = useRef(load);
+  const lengthTest = useRef(isLength);
+
+  useEffect(() => afterFirstPaint(() => void loader.current().then(setLoaded, () => undefined)), []);
+  useEffect(() => {
+    const settings = deviceSettings(); // not the rendered ones: the first client render still sees the defaults
+    store.adopt(unitOf(settings.units), precisionOf(settings), lengthTest.current);
+  }, [store, unit, precision]);
+
+  const deferred = useDeferredValue(form);
+  const input = useMemo(() => inputOf(deferred, prepare), [deferred, prepare]);
+  const answered = useMemo((): Answered<Answer> => {
+    if (loaded !== null) return loaded.answerTo(loaded.operation, input) as Answered<Answer>;
+    return initial?.answered ?? nothingTyped;
+  }, [loaded, input, initial]);
+
+  const sentence = (issue: Issue): string => {
+    const key = `errors.${issue.code}`;
+    const example = form.unit === "mm" ? "8725 mm" : "28' 7 1/2\"";
+    return t(t.has(key) ? key : "errors.not-valid", { example, ...issue.params });
+  };
+  const nameOf = (issue: Issue) => issue.pointer.slice(1).replaceAll("/", ".");
+  const shown = answered.issues.filter((issue) => {
+    const field = nameOf(issue);
+    if (asked) return true;
+    return field !== focused && (form.fields[field] ?? "").trim() !== "";
+  });
+  const change = (fields: Fields) => store.change({ ...store.get(), fields: { ...store.get().fields, ...fields } });
+
+  return {
+    ...form,
+    /** The answer to what is typed now, or null while something is missing or wrong. */
+    answer: answered.answer as Answer | null,
+    issues: answered.issues,
+    /** Issues to show in a summary, each with the name of its field and its sentence. */
+    shownIssues: shown.map((issue) => ({ name: nameOf(issue), sentence: sentence(issue) })),
+    /** Whether the answer belongs to an older key press than the one on screen. */
+    settling: deferred !== form,
+    ready: loaded !== null,
+    asked,
+    summary,
+    /** The plain input, as the API takes it. */
+    input,
+    query: queryFromForm(form).toString(),
+    value: (field: string) => form.fields[field] ?? "",
+    set: (field: string, text: string) => change({ [field]: text }),
+    change,
+    errorAt: (field: string) => {
+      const issue = shown.find((candidate) => nameOf(candidate) === field);
+      return issue === undefined ? undefined : sentence(issue);
+    },
+    rows: (list: string) => rowCount(form.fields, list),
+    removeRow: (list: string, row: number) => store.change({ ...store.get(), fields: withoutRow(store.get().fields, list, row) }),
+    /** Everything back to a fresh page. */
+    reset: () => {
+      setAsked(false);
+      store.change({ ...store.get(), fields: defaults ?? {} });
+    },
+    /** Writes the address at once, for a copy of it. */
+    flush: store.flush,
+    /** Spread on a length field: its name, text, error, unit and precision. */
+    field: (field: string) => ({
+      name: field,
+      value: form.fields[field] ?? "",
+      onChange: (text: string) => change({ [field]: text }),
+      error: shown.some((issue) => nameOf(issue) === field) ? sentence(shown.find((issue) => nameOf(issue) === field)!) : undefined,
+      unit: form.unit,
+      precision: form.precision,
+    }),
+    /** Spread on the form: without script it goes to the answer page. */
+    formProps: {
+      method: "get" as const,
+      action: localePath(t.locale, `/calculators/${name}/answer`),
+      noValidate: true,
+      autoComplete: "off",
+      onSubmit: (event: FormEvent) => {
+        event.preventDefault();
+        setAsked(true);
+        store.flush();
+        requestAnimationFrame(() => summary.current?.focus());
+      },
+      onFocus: (event: FocusEvent) => setFocused((event.target as HTMLInputElement).name || null),
+      onBlur: () => setFocused(null),
+    },
+  };
+}
+
+function inputOf(form: FormState, prepare?: (input: Record<string, unknown>) => Record<string, unknown>): Record<string, unknown> {
+  const input = inputFromQuery(queryFromForm(form));
+  return prepare === undefined ? input : prepare(input);
+}
