@@ -5,6 +5,7 @@ module.exports = {
     await db.createTable("short_links", {
       id: { type: CHAR(10, true), primaryKey: true, allowNull: false },
       calculator: { type: STRING(40), allowNull: false },
+      operation: { type: STRING(40), allowNull: false },
       version: { type: STRING(20), allowNull: false },
       locale: { type: STRING(10), allowNull: false },
       inputs: { type: JSON, allowNull: false },

@@ -5,6 +5,7 @@ import { type CreationOptional, DataTypes, type InferAttributes, type InferCreat
 export class ShortLink extends Model<InferAttributes<ShortLink>, InferCreationAttributes<ShortLink>> {
   declare id: string; // ten base62 characters from a secure source: 59 bits, so that nobody finds another's by trying
   declare calculator: string;
+  declare operation: string; // its path under /api/v1, since a calculator may have several
   declare version: string;
   declare locale: string;
   declare inputs: unknown;
@@ -17,6 +18,7 @@ export function defineShortLink(sequelize: Sequelize): void {
   ShortLink.init({
     id: { type: DataTypes.CHAR(10, true), primaryKey: true, allowNull: false },
     calculator: { type: DataTypes.STRING(40), allowNull: false },
+    operation: { type: DataTypes.STRING(40), allowNull: false },
     version: { type: DataTypes.STRING(20), allowNull: false },
     locale: { type: DataTypes.STRING(10), allowNull: false },
     inputs: { type: DataTypes.JSON, allowNull: false },

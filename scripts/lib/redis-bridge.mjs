@@ -16,10 +16,9 @@ const opens = (address) =>
   });
 
 /** Debian's Redis on a socket only we can reach: nothing kept on disk, nothing on the network. */
-export async function startRedis({ dataDir, runDir, logDir }) {
+export async function startRedis({ dataDir, runDir, logDir, sockets = socketFolder() }) {
   const folder = path.join(dataDir, "redis");
   mkdirSync(folder, { recursive: true, mode: 0o700 });
-  const sockets = socketFolder();
   const socket = path.join(sockets, "redis.sock");
   const service = startService({
     name: "redis",
@@ -35,7 +34,8 @@ export async function startRedis({ dataDir, runDir, logDir }) {
     await service.stop();
     throw error;
   }
-  return { service, stop: service.stop, socket };
+  const again = () => startRedis({ dataDir, runDir, logDir, sockets });
+  return { service, stop: service.stop, again, socket };
 }
 
 /** The stand-in for Upstash in front of it, on a free loopback port. */
@@ -55,5 +55,6 @@ export async function startBridge({ runDir, logDir, socket, token, port: asked }
     await service.stop();
     throw error;
   }
-  return { service, stop: service.stop, port, url: `http://127.0.0.1:${port}`, note: `127.0.0.1:${port}` };
+  const again = () => startBridge({ runDir, logDir, socket, token, port });
+  return { service, stop: service.stop, again, port, url: `http://127.0.0.1:${port}`, note: `127.0.0.1:${port}` };
 }

@@ -3,15 +3,7 @@ import { existsSync } from "node:fs";
 import path from "node:path";
 import { Failure } from "./failure.mjs";
 
-const LEAST_NODE = [20, 9];
 const MEBIBYTE = 1024 * 1024;
-
-/** @throws Failure when this Node cannot run Next 16. */
-export function checkNode(version = process.versions.node) {
-  const [major, minor] = version.split(".").map(Number);
-  if (major > LEAST_NODE[0] || (major === LEAST_NODE[0] && minor >= LEAST_NODE[1])) return `Node ${version}`;
-  throw new Failure(`This is Node ${version}, and Sillwright needs Node ${LEAST_NODE.join(".")} or newer: install it (Debian 12 users: from nodejs.org or nvm; .nvmrc names the version) and start again.`);
-}
 
 /** @throws Failure when the disk under `folder` has less free than an installation and a build take. */
 export async function checkDisk(folder, { leastMebibytes = 1024, measure = statfs } = {}) {
