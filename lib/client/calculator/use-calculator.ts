@@ -52,8 +52,7 @@ export function useCalculator<AnswerSchema extends z.ZodType>({ name, load, isLe
   const form = useSyncExternalStore(store.subscribe, store.get, store.getInitial);
   const [loaded, setLoaded] = useState<LoadedOperation | null>(null);
   const [focused, setFocused] = useState<string | null>(null);
-  const [asked, setAsked] = useState(initial !== undefined);
-  const summary = useRef<HTMLDivElement>(null);
+  const [asked, setAsked] = useState(initial === undefined ? 0 : 1);
   const loader = useRef(load);
   const lengthTest = useRef(isLength);
 
@@ -78,9 +77,13 @@ export function useCalculator<AnswerSchema extends z.ZodType>({ name, load, isLe
   const nameOf = (issue: Issue) => issue.pointer.slice(1).replaceAll("/", ".");
   const shown = answered.issues.filter((issue) => {
     const field = nameOf(issue);
-    if (asked) return true;
+    if (asked > 0) return true;
     return field !== focused && (form.fields[field] ?? "").trim() !== "";
   });
+  const errorAt = (field: string) => {
+    const issue = shown.find((candidate) => nameOf(candidate) === field);
+    return issue === undefined ? undefined : sentence(issue);
+  };
   const change = (fields: Fields) => store.change({ ...store.get(), fields: { ...store.get().fields, ...fields } });
 
   return {
@@ -88,38 +91,36 @@ export function useCalculator<AnswerSchema extends z.ZodType>({ name, load, isLe
     /** The answer to what is typed now, or null while something is missing or wrong. */
     answer: answered.answer as Answer | null,
     issues: answered.issues,
-    /** Issues to show in a summary, each with the name of its field and its sentence. */
-    shownIssues: shown.map((issue) => ({ name: nameOf(issue), sentence: sentence(issue) })),
+    /** Issues to show in the summary above the form, each leading to its field. */
+    problems: shown.map((issue) => ({ fieldId: form.fields[nameOf(issue)] !== undefined || issue.code === "required" ? fieldId(nameOf(issue)) : undefined, text: sentence(issue) })),
     /** Whether the answer belongs to an older key press than the one on screen. */
     settling: deferred !== form,
     ready: loaded !== null,
+    /** How often the answer was asked for. */
     asked,
-    summary,
     /** The plain input, as the API takes it. */
     input,
     query: queryFromForm(form).toString(),
     value: (field: string) => form.fields[field] ?? "",
     set: (field: string, text: string) => change({ [field]: text }),
     change,
-    errorAt: (field: string) => {
-      const issue = shown.find((candidate) => nameOf(candidate) === field);
-      return issue === undefined ? undefined : sentence(issue);
-    },
+    errorAt,
     rows: (list: string) => rowCount(form.fields, list),
     removeRow: (list: string, row: number) => store.change({ ...store.get(), fields: withoutRow(store.get().fields, list, row) }),
     /** Everything back to a fresh page. */
     reset: () => {
-      setAsked(false);
+      setAsked(0);
       store.change({ ...store.get(), fields: defaults ?? {} });
     },
     /** Writes the address at once, for a copy of it. */
     flush: store.flush,
     /** Spread on a length field: its name, text, error, unit and precision. */
     field: (field: string) => ({
+      id: fieldId(field),
       name: field,
       value: form.fields[field] ?? "",
       onChange: (text: string) => change({ [field]: text }),
-      error: shown.some((issue) => nameOf(issue) === field) ? sentence(shown.find((issue) => nameOf(issue) === field)!) : undefined,
+      error: errorAt(field),
       unit: form.unit,
       precision: form.precision,
     }),
@@ -131,14 +132,18 @@ export function useCalculator<AnswerSchema extends z.ZodType>({ name, load, isLe
       autoComplete: "off",
       onSubmit: (event: FormEvent) => {
         event.preventDefault();
-        setAsked(true);
+        setAsked((count) => count + 1);
         store.flush();
-        requestAnimationFrame(() => summary.current?.focus());
       },
       onFocus: (event: FocusEvent) => setFocused((event.target as HTMLInputElement).name || null),
       onBlur: () => setFocused(null),
     },
   };
+}
+
+/** The id of a field's control. */
+export function fieldId(name: string): string {
+  return `field-${name.replaceAll(".", "-")}`;
 }
 
 function inputOf(form: FormState, prepare?: (input: Record<string, unknown>) => Record<string, unknown>): Record<string, unknown> {
