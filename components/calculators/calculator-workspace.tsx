@@ -2,7 +2,7 @@
 
 import { lazy, Suspense, useState, type ReactNode } from "react";
 import { Button, ButtonLink } from "@/components/ui/button";
-import { ErrorSummary, type FieldProblem } from "@/components/ui/error-summary";
+import { ErrorSummary } from "@/components/ui/error-summary";
 import type { useCalculator } from "@/lib/client/calculator/use-calculator";
 import { useTranslate } from "@/lib/client/i18n/messages-context";
 import { PrecisionChoice } from "./precision-choice";
@@ -41,7 +41,7 @@ export function CalculatorWorkspace({ form, name, operation, header, drawing, fi
       <div className="calculator-header">{header}</div>
       <div className="calculator-drawing">{drawing}</div>
       <form className="calculator-form" {...form.formProps}>
-        <ErrorSummary problems={form.problems as readonly FieldProblem[]} asked={form.asked} />
+        <ErrorSummary problems={form.problems} asked={form.asked} />
         {fields}
         <div className="calculator-rounding">
           <noscript>

@@ -9,15 +9,14 @@ export interface FieldProblem {
   text: ReactNode;
 }
 
-/** All that needs another look, above the form. It takes focus when it appears, and again whenever `asked` grows: count the times the form was sent. */
+/** All that needs another look, above the form. Shown once the answer was asked for; takes focus each time `asked` grows: count the times the form was sent. */
 export function ErrorSummary({ problems, asked }: { problems: readonly FieldProblem[]; asked: number }) {
   const t = useTranslate();
   const box = useRef<HTMLDivElement>(null);
-  const shown = problems.length > 0;
   useEffect(() => {
-    if (shown && asked > 0) box.current?.focus();
-  }, [shown, asked]);
-  if (!shown) return null;
+    if (asked > 0) box.current?.focus(); // only when asked: typing on must never lose its field
+  }, [asked]);
+  if (asked === 0 || problems.length === 0) return null;
   return (
     <div ref={box} className="error-summary" tabIndex={-1} role="alert" aria-labelledby="error-summary-title">
       <h2 id="error-summary-title">{t("common.errors.title", { count: problems.length })}</h2>
