@@ -1,10 +1,11 @@
 "use client";
 
-import { useId } from "react";
+import { fieldId } from "@/lib/client/calculator/field-id";
 import { describedBy, Field, type FieldTexts } from "./field";
 
 interface SelectProps extends FieldTexts {
   name: string;
+  /** Made from `name` when not given. */
   id?: string;
   options: readonly { value: string; label: string }[];
   value: string;
@@ -12,9 +13,7 @@ interface SelectProps extends FieldTexts {
 }
 
 /** A choice from a list, by the browser's own control. */
-export function Select({ name, id: givenId, options, value, onChange, ...texts }: SelectProps) {
-  const ownId = useId();
-  const id = givenId ?? ownId;
+export function Select({ name, id = fieldId(name), options, value, onChange, ...texts }: SelectProps) {
   return (
     <Field id={id} {...texts}>
       <select

@@ -1,10 +1,12 @@
 "use client";
 
-import { useId, type HTMLInputTypeAttribute } from "react";
+import type { HTMLInputTypeAttribute } from "react";
+import { fieldId } from "@/lib/client/calculator/field-id";
 import { describedBy, Field, type FieldTexts } from "./field";
 
 interface TextFieldProps extends FieldTexts {
   name: string;
+  /** Made from `name` when not given. */
   id?: string;
   value: string;
   onChange: (value: string) => void;
@@ -16,9 +18,7 @@ interface TextFieldProps extends FieldTexts {
 }
 
 /** A field for anything that is not a length: a count, a temperature, a name. */
-export function TextField({ name, id: givenId, value, onChange, inputMode = "decimal", type = "text", suffix, ...texts }: TextFieldProps) {
-  const ownId = useId();
-  const id = givenId ?? ownId;
+export function TextField({ name, id = fieldId(name), value, onChange, inputMode = "decimal", type = "text", suffix, ...texts }: TextFieldProps) {
   return (
     <Field id={id} {...texts}>
       <div className="length-box">

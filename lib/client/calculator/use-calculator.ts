@@ -9,6 +9,7 @@ import { localePath } from "@/lib/client/i18n/locales";
 import { useTranslate } from "@/lib/client/i18n/messages-context";
 import { precisionOf, unitOf } from "@/lib/client/settings/device-settings";
 import { deviceSettings, useDeviceSettings } from "@/lib/client/settings/use-device-settings";
+import { fieldId } from "./field-id";
 import { defaultPrecision, defaultUnit, queryFromForm, rowCount, withoutRow, type Fields, type FormState } from "./form-fields";
 import { createFormStore } from "./form-store";
 
@@ -139,11 +140,6 @@ export function useCalculator<AnswerSchema extends z.ZodType>({ name, load, isLe
       onBlur: () => setFocused(null),
     },
   };
-}
-
-/** The id of a field's control. */
-export function fieldId(name: string): string {
-  return `field-${name.replaceAll(".", "-")}`;
 }
 
 function inputOf(form: FormState, prepare?: (input: Record<string, unknown>) => Record<string, unknown>): Record<string, unknown> {
