@@ -84,6 +84,11 @@ export const variables = {
     shown: "a free one",
     meaning: "port of the local MariaDB on 127.0.0.1",
   },
+  PROVE: {
+    schema: text,
+    shown: "unset",
+    meaning: "1 makes the property tests run many times longer; `npm run prove` sets it",
+  },
 } as const;
 
 const environment = z.object({

@@ -48,10 +48,10 @@ export function buildCurrent(root, hash = sourceHash(root)) {
 export const buildId = (root) => readFileSync(path.join(root, ".next", "BUILD_ID"), "utf8").trim();
 
 /** One build at a time in a checkout: the second waits, and then finds the first one's work. */
-async function ownBuild(root, dataDir) {
+async function ownBuild(root) {
   for (let waited = 0; ; waited += 500) {
     try {
-      return own(path.join(dataDir, "build"), (pid) => `Another build of this folder runs as process ${pid} and has not finished in ten minutes: end it and start again.`);
+      return own(path.join(root, ".data", "build"), (pid) => `Another build of this folder runs as process ${pid} and has not finished in ten minutes: end it and start again.`);
     } catch (error) {
       if (!(error instanceof Failure) || waited >= 600_000) throw error;
       await pause(500);
@@ -60,8 +60,8 @@ async function ownBuild(root, dataDir) {
 }
 
 /** Builds the standalone site unless the last build is fresh, with its security headers and static files in place. */
-export async function build(root, { dataDir, force = false, show = false }) {
-  const release = await ownBuild(root, dataDir);
+export async function build(root, { force = false, show = false } = {}) {
+  const release = await ownBuild(root);
   try {
     const hash = sourceHash(root);
     if (!force && buildCurrent(root, hash)) return "fresh";

@@ -3,7 +3,8 @@ import { stopRunning } from "./run.mjs";
 
 /**
  * Runs a script's whole work and sees to it that nothing it started outlives it: not on success, not on failure, not on Ctrl-C.
- * `work` gets `keep(thing)`, which remembers anything with a `stop()`; they are stopped last first.
+ * `work` gets `keep(thing)`, which remembers anything with a `stop()`; they are stopped last first. It answers the exit code, or
+ * `{ code, lastWords }` whose words are printed when everything has stopped.
  */
 export async function lifecycle(work) {
   const kept = [];
@@ -29,15 +30,18 @@ export async function lifecycle(work) {
     });
   }
 
-  let code;
+  let result;
   try {
-    code = (await work((thing) => (kept.push(thing), thing), () => stopping !== undefined)) ?? 0;
+    result = (await work((thing) => (kept.push(thing), thing), () => stopping !== undefined)) ?? 0;
   } catch (error) {
     if (stopping) return; // a step that our own stop cut short
     report(error);
-    code = 1;
+    result = 1;
   }
   if (stopping) return;
   await stopAll();
-  process.exit(code);
+  const { code, lastWords } = typeof result === "object" ? result : { code: result };
+  if (lastWords) console.log(lastWords);
+  process.exitCode = code;
+  setTimeout(() => process.exit(code), 1_000).unref(); // Output is written out first; nothing may hold us longer.
 }

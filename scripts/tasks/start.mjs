@@ -17,7 +17,7 @@ await lifecycle(async (keep, isStopping) => {
   const { environment, started } = await startServices(own, keep);
   await step("Tables", () => migrate(environment.DATABASE_URL));
   if (!own.databaseUrl) await step("Demo data", () => seedDemo(environment.DATABASE_URL));
-  await step("Build", () => build(root, { dataDir: own.dataDir }));
+  await step("Build", () => build(root));
 
   const port = await choosePort({ asked: own.port, usual: 3000, host: own.host, variable: "PORT" });
   if (!own.port && port !== 3000) console.log(`Port 3000 is taken by another program, so the site takes ${port}. Set PORT to choose one yourself.`);

@@ -1,0 +1,31 @@
+import { defineConfig, devices } from "@playwright/test";
+
+/**
+ * The end-to-end tests, in the distribution's Chromium against the built site that `npm test` started.
+ * Every test runs on a desktop screen; one whose title says @phone runs on a phone as well, and @phone-only there alone.
+ */
+export default defineConfig({
+  testDir: "tests/e2e",
+  outputDir: "test-results",
+  fullyParallel: true,
+  workers: 2,
+  retries: 0,
+  timeout: 45_000,
+  expect: { timeout: 10_000 },
+  forbidOnly: Boolean(process.env.CI),
+  use: {
+    baseURL: process.env.E2E_BASE_URL ?? "http://localhost:3000",
+    locale: "en-US",
+    trace: "off",
+    screenshot: "only-on-failure",
+    launchOptions: {
+      executablePath: "/usr/bin/chromium",
+      // No sandbox, since tests may run as root; the rest keeps Chromium from calling home.
+      args: ["--no-sandbox", "--disable-gpu", "--disable-quic", "--no-first-run", "--disable-background-networking", "--disable-component-update", "--disable-sync"],
+    },
+  },
+  projects: [
+    { name: "desktop", grepInvert: /@phone-only/, use: { ...devices["Desktop Chrome"], viewport: { width: 1280, height: 900 } } },
+    { name: "phone", grep: /@phone/, use: { ...devices["Pixel 7"], viewport: { width: 390, height: 844 } } },
+  ],
+});

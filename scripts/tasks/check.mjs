@@ -1,0 +1,3 @@
+import { testRun } from "../lib/test-run.mjs";
+
+await testRun(["lint", "types", "unit", "integration"], { filters: process.argv.slice(2) });
