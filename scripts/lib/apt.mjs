@@ -10,6 +10,9 @@ export const systemPackages = {
   chromium: { package: "chromium", programs: ["chromium"] },
 };
 
+/** Debian's own way to say "install, but start nothing". */
+const POLICY = "/usr/sbin/policy-rc.d";
+
 /** The full path of a program, looking where Debian keeps servers too. */
 export function findProgram(name, searchPath = process.env.PATH ?? "") {
   for (const folder of [...searchPath.split(":"), "/usr/sbin", "/usr/bin", "/usr/local/bin", "/usr/local/sbin"]) {
@@ -29,7 +32,7 @@ export function findProgram(name, searchPath = process.env.PATH ?? "") {
  * runs its own copies with their own data.
  * @throws Failure when there is no apt, or no right to use it.
  */
-export async function ensureSystemPackages(names, { find = findProgram, execute = run, userId = process.getuid?.() ?? 0 } = {}) {
+export async function ensureSystemPackages(names, { find = findProgram, execute = run, userId = process.getuid?.() ?? 0, policy = POLICY } = {}) {
   const missing = names.map((name) => systemPackages[name]).filter(({ programs }) => !programs.every((program) => find(program)));
   if (missing.length === 0) return "already here";
   const packages = missing.map((entry) => entry.package);
@@ -39,7 +42,6 @@ export async function ensureSystemPackages(names, { find = findProgram, execute 
   const prefix = await rootPrefix({ find, execute, userId, list });
   const execPrefixed = (...command) => execute(...asRoot(prefix, command));
 
-  const policy = "/usr/sbin/policy-rc.d"; // Debian's own way to say "install, but start nothing"
   const quiet = !existsSync(policy);
   if (quiet) await execPrefixed("sh", "-c", `printf '#!/bin/sh\\nexit 101\\n' > ${policy} && chmod 755 ${policy}`);
   try {

@@ -21,20 +21,28 @@ export function freePort(host = "127.0.0.1") {
   return tryPort(0, host);
 }
 
+/** What to do about a port that could not be opened, or undefined when it is merely taken. */
+function portFailure({ code }, { port, host, variable }) {
+  if (code === "EACCES") return new Failure(`This account may not open port ${port}: set ${variable} to a port above 1023.`);
+  if (code === "EADDRINUSE") return undefined;
+  return new Failure(`${host} is not an address of this machine: set HOST to 127.0.0.1, or to 0.0.0.0 to open the site to the network.`);
+}
+
 /**
  * The port to use: the one asked for, or the first free one from `usual` on.
- * @throws Failure when the one asked for is taken or not allowed.
+ * @throws Failure when the one asked for is taken or none can be opened.
  */
-export async function choosePort({ asked, usual, host = "127.0.0.1", variable }) {
-  if (asked !== undefined) {
-    const error = await tryPort(asked, host).then(() => undefined, (reason) => reason);
-    if (!error) return asked;
-    if (error.code === "EACCES") throw new Failure(`This account may not open port ${asked}: set ${variable} to a port above 1023.`);
-    if (error.code === "EADDRNOTAVAIL" || error.code === "ENOTFOUND" || error.code === "EINVAL")
-      throw new Failure(`${host} is not an address of this machine: set HOST to 127.0.0.1, or to 0.0.0.0 to open the site to the network.`);
-    throw new Failure(`Port ${asked} is taken by another program: stop that program, or set ${variable} to another port.`);
+export async function choosePort({ asked, usual = 0, host = "127.0.0.1", variable }) {
+  const first = asked ?? usual;
+  const last = asked ?? usual + 100;
+  for (let port = first; port <= last; port += 1) {
+    try {
+      return await tryPort(port, host);
+    } catch (error) {
+      const failure = portFailure(error, { port, host, variable });
+      if (failure) throw failure;
+    }
   }
-  if (usual === undefined) return freePort(host);
-  for (let port = usual; port < usual + 100; port += 1) if (await isFree(port, host)) return port;
-  return freePort(host);
+  if (asked === undefined) return freePort(host);
+  throw new Failure(`Port ${asked} is taken by another program: stop that program, or set ${variable} to another port.`);
 }
