@@ -16,6 +16,7 @@ const config = {
   output: "standalone",
   outputFileTracingRoot: root,
   turbopack: { root },
+  typescript: { ignoreBuildErrors: true }, // `npm run check` is where types are checked; a slip in a test must not keep the site from starting
   distDir: process.env.NEXT_DIST_DIR ?? ".next",
   poweredByHeader: false,
   reactStrictMode: true,

@@ -31,6 +31,7 @@ function portFailure({ code }, { port, host, variable }) {
 /**
  * The port to use: the one asked for, or the first free one from `usual` on.
  * @throws Failure when the one asked for is taken or none can be opened.
+ * @param {{ asked?: number, usual?: number, host?: string, variable: string }} wish
  */
 export async function choosePort({ asked, usual = 0, host = "127.0.0.1", variable }) {
   const first = asked ?? usual;

@@ -11,7 +11,10 @@ const port = (name, value) => {
   throw new Failure(`${name} is "${value}": set it to a port number from 1 to 65535, or leave it out.`);
 };
 
-/** What the scripts read from the environment; `lib/env.ts` holds the same names with their meaning. */
+/**
+ * What the scripts read from the environment; `lib/env.ts` holds the same names with their meaning.
+ * @param {Record<string, string | undefined>} environment
+ */
 export function settings(environment = process.env) {
   const dataDir = path.resolve(root, environment.SILLWRIGHT_DATA_DIR || ".data");
   const given = (name) => environment[name] || undefined;

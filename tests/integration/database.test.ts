@@ -41,7 +41,8 @@ describe("the database", () => {
       { type: QueryTypes.SELECT },
     );
     expect(row).toEqual({ lockWait: 5, idle: 600, zone: "+00:00", charset: "utf8mb4" });
-    expect((database().options.pool?.idle ?? Infinity) / 1000).toBeLessThan(600);
+    const { options } = database() as unknown as { options: { pool: { idle: number } } }; // there, though its types leave it out
+    expect(options.pool.idle / 1000).toBeLessThan(600);
   });
 
   test("writes each commit to disk before it answers", async () => {
