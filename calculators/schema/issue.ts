@@ -23,20 +23,23 @@ export function pointerTo(path: readonly PropertyKey[]): string {
 
 /** Every fault zod found, as ours: one issue a field, in the order of the fields. */
 export function issuesOf(error: z.ZodError): Issue[] {
-  return error.issues.flatMap(translate);
+  return error.issues.flatMap((issue) => translate(issue));
 }
 
-function translate(issue: z.core.$ZodIssue): Issue[] {
-  const at = (code: string, params: Issue["params"] = {}): Issue[] => [{ pointer: pointerTo(issue.path), code, params }];
+function translate(issue: z.core.$ZodIssue, above: readonly PropertyKey[] = []): Issue[] {
+  const path = [...above, ...issue.path];
+  const at = (code: string, params: Issue["params"] = {}): Issue[] => [{ pointer: pointerTo(path), code, params }];
   switch (issue.code) {
     case "custom":
       return at(String(issue.params?.code ?? issue.message), (issue.params?.params ?? {}) as Issue["params"]);
     case "unrecognized_keys":
-      return issue.keys.map((key) => ({ pointer: pointerTo([...issue.path, key]), code: "unknown-field", params: { field: key } }));
+      return issue.keys.map((key) => ({ pointer: pointerTo([...path, key]), code: "unknown-field", params: { field: key } }));
     case "invalid_type":
       return issue.message.endsWith("received undefined") ? at("required") : at(`expected-${issue.expected}`);
-    case "invalid_union":
-      return at(issue.message);
+    case "invalid_union": {
+      const meant = branchMeant(issue);
+      return meant === undefined ? at(issue.message) : meant.flatMap((inner) => translate(inner, path));
+    }
     case "invalid_value":
       return at("not-one-of", { options: issue.values.map(String).join(", ") });
     case "too_small":
@@ -46,4 +49,10 @@ function translate(issue: z.core.$ZodIssue): Issue[] {
     default:
       return at("not-valid");
   }
+}
+
+/** The one way of a union that the input is of the right kind for, so that its own faults can be told; undefined when none is. */
+function branchMeant(issue: z.core.$ZodIssueInvalidUnion): readonly z.core.$ZodIssue[] | undefined {
+  const isOfAnotherKind = (inner: z.core.$ZodIssue) => inner.path.length === 0 && ["invalid_type", "invalid_value", "invalid_union"].includes(inner.code);
+  return issue.errors.find((branch) => branch.length > 0 && !branch.some(isOfAnotherKind));
 }
