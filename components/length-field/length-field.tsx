@@ -32,6 +32,8 @@ export interface LengthFieldProps {
   burn?: string;
 }
 
+const echoKeys = { actual: "common.field.actual", inches: "common.field.inInches", plain: "common.field.echo" } as const;
+
 /** How long the slim row outlives focus: a tap on what lies below must land before the row's place closes. */
 const rowLingersMilliseconds = 350;
 
@@ -79,7 +81,7 @@ export function LengthField({ name, id = fieldId(name), value, onChange, unit, p
           onBlur={blur}
         />
         <span id={`${id}-echo`} className="length-echo">
-          {echo === null ? null : echo.kind === "plain" ? echo.text : t(echo.kind === "actual" ? "common.field.actual" : "common.field.inInches", { length: echo.text })}
+          {echo === null ? null : t.rich(echoKeys[echo.kind], { length: <span className="whitespace-nowrap">{echo.text}</span> })}
         </span>
       </div>
       <MarkKeys input={input} onChange={onChange} />

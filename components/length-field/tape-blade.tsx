@@ -94,7 +94,7 @@ export function TapeBlade({ core, label, value, onChange, unit, precision, contr
 function NudgeMark({ back = false }: { back?: boolean }) {
   return (
     <svg width="20" height="20" viewBox="0 0 20 20" aria-hidden="true" focusable="false">
-      <path d={back ? "M13 3v14M9.5 10 2 5v10z" : "M7 3v14M10.5 10 18 5v10z"} fill="currentColor" stroke="currentColor" strokeWidth="2" />
+      <path d={back ? "M16 2v16M11 4v12L2.5 10z" : "M4 2v16M9 4v12l8.5-6z"} fill="currentColor" stroke="currentColor" strokeWidth="1.6" />
     </svg>
   );
 }

@@ -1,0 +1,88 @@
+import type { ReactNode } from "react";
+
+/** The small drawings of the work that stand for each calculator. Decorative: the name is beside them. */
+function Tile({ children }: { children: ReactNode }) {
+  return (
+    <svg className="tile-drawing" width="150" height="92" viewBox="0 0 150 92" aria-hidden="true" focusable="false">
+      {children}
+    </svg>
+  );
+}
+
+const slab = { fill: "var(--concrete)", stroke: "var(--edge-strong)", strokeWidth: 2 } as const;
+const chalk = { fill: "none", stroke: "var(--chalk-line)" } as const;
+
+function SquarenessTile() {
+  return (
+    <Tile>
+      <polygon points="20,78 118,78 132,14 34,14" {...slab} />
+      <path d="M20 78 132 14" {...chalk} strokeWidth="2.4" />
+      <path d="M118 78 34 14" {...chalk} strokeWidth="2.4" strokeDasharray="8 4" />
+    </Tile>
+  );
+}
+
+function CornerTile() {
+  return (
+    <Tile>
+      <path d="M24 8v72h112" fill="none" stroke="var(--edge-strong)" strokeWidth="2" />
+      <path d="M24 26v54h72" {...chalk} strokeWidth="3" />
+      <path d="M24 26 96 80" {...chalk} strokeWidth="2.4" strokeDasharray="8 4" />
+      <path d="M24 66h14v14" fill="none" stroke="var(--ink)" strokeWidth="1.6" />
+      <path d="M19 26h10M96 75v10" stroke="var(--keel)" strokeWidth="2.6" />
+    </Tile>
+  );
+}
+
+function InsetTile() {
+  return (
+    <Tile>
+      <rect x="16" y="12" width="118" height="68" {...slab} />
+      <rect x="26" y="22" width="98" height="48" {...chalk} strokeWidth="3" />
+    </Tile>
+  );
+}
+
+function AnchorsTile() {
+  return (
+    <Tile>
+      <rect x="8" y="34" width="134" height="24" fill="var(--timber)" stroke="var(--timber-edge)" strokeWidth="2" />
+      {[22, 58, 93, 128].map((x) => (
+        <circle key={x} cx={x} cy="46" r="5.5" fill="var(--steel)" />
+      ))}
+      <path d="M22 66h106M22 62v8M58 62v8M93 62v8M128 62v8" fill="none" stroke="var(--ink)" strokeWidth="1.6" />
+    </Tile>
+  );
+}
+
+function ConversionsTile() {
+  return (
+    <Tile>
+      <rect x="1" y="18" width="148" height="52" fill="var(--blade)" stroke="var(--edge)" strokeWidth="1.5" />
+      {Array.from({ length: 17 }, (_, tick) => {
+        const x = 11 + tick * 8;
+        const length = tick % 16 === 0 ? 40 : tick % 8 === 0 ? 30 : tick % 4 === 0 ? 24 : tick % 2 === 0 ? 17 : 11;
+        return tick === 14 ? (
+          <line key={tick} x1={x} x2={x} y1="19" y2="47" stroke="var(--keel)" strokeWidth="3.4" />
+        ) : (
+          <line key={tick} x1={x} x2={x} y1="19" y2={19 + length} stroke="var(--ink)" strokeWidth="1.4" />
+        );
+      })}
+      <path d="M123 50l-6 9h12z" fill="var(--keel)" />
+    </Tile>
+  );
+}
+
+const tiles: Readonly<Record<string, () => ReactNode>> = {
+  squareness: SquarenessTile,
+  corner: CornerTile,
+  inset: InsetTile,
+  anchors: AnchorsTile,
+  conversions: ConversionsTile,
+};
+
+/** The drawing of a calculator by its folder name. */
+export function TileDrawing({ name }: { name: string }) {
+  const Drawing = tiles[name];
+  return Drawing === undefined ? null : <Drawing />;
+}
