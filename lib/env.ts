@@ -125,3 +125,13 @@ export const env: Environment = new Proxy({} as Environment, {
     return (read = readEnvironment())[name];
   },
 });
+
+/** Ends the process when the environment is not complete: a site half of whose pages fail later is worse than none. */
+export function checkEnvironment(): void {
+  try {
+    read = readEnvironment();
+  } catch (error) {
+    console.error((error as Error).message);
+    process.exit(1);
+  }
+}
