@@ -4,7 +4,8 @@ import type { LengthUnit } from "./length";
 
 const feetMarks = "'\u2018\u2019\u201B\u2032\u00B4\u0060\u02B9\u02BC\u02C8\uFF07";
 const inchMarks = "\"\u201C\u201D\u201F\u2033\u02BA\u3003\uFF02";
-const dashes = "-\u00AD\u2010\u2011\u2012\u2013\u2014\u2015\u2212\uFE58\uFE63\uFF0D";
+/** Every Unicode dash, the minus sign, and two that look like one. A soft hyphen is none: it is seen at a line's end only. */
+const dash = /^[\p{Pd}\u2212\u2043\u02D7]$/u;
 const slashes = "/\u2044\u2215\uFF0F";
 
 const builtFractions: Readonly<Record<string, readonly [bigint, bigint]>> = {
@@ -14,17 +15,21 @@ const builtFractions: Readonly<Record<string, readonly [bigint, bigint]>> = {
   "\u2151": [1n, 9n], "\u2152": [1n, 10n],
 };
 
-/** English and Spanish words for units, in lower case. */
-const unitWords = new Map<string, LengthUnit>([
-  ["ft", "ft"], ["foot", "ft"], ["feet", "ft"], ["pie", "ft"], ["pies", "ft"],
-  ["in", "in"], ["ins", "in"], ["inch", "in"], ["inches", "in"], ["pulg", "in"], ["plg", "in"], ["pulgada", "in"], ["pulgadas", "in"],
-  ["mm", "mm"], ["millimeter", "mm"], ["millimeters", "mm"], ["millimetre", "mm"], ["millimetres", "mm"], ["milímetro", "mm"], ["milímetros", "mm"], ["milimetro", "mm"], ["milimetros", "mm"],
-  ["cm", "cm"], ["centimeter", "cm"], ["centimeters", "cm"], ["centimetre", "cm"], ["centimetres", "cm"], ["centímetro", "cm"], ["centímetros", "cm"], ["centimetro", "cm"], ["centimetros", "cm"],
-  ["m", "m"], ["meter", "m"], ["meters", "m"], ["metre", "m"], ["metres", "m"], ["metro", "m"], ["metros", "m"],
-]);
+/** English and Spanish words for units, in lower case and without accents. */
+const unitWords = new Map<string, LengthUnit>(
+  Object.entries({
+    ft: "ft foot feet pie pies",
+    in: "in ins inch inches pulg plg pulgada pulgadas",
+    mm: "mm mms millimeter millimeters millimetre millimetres milimetro milimetros",
+    cm: "cm cms centimeter centimeters centimetre centimetres centimetro centimetros",
+    m: "m mt mts meter meters metre metres metro metros",
+  } satisfies Record<LengthUnit, string>).flatMap(([unit, words]) => words.split(" ").map((word): [string, LengthUnit] => [word, unit as LengthUnit])),
+);
 
-const whiteSpace = /^[\s\u00A0\u180E\u200B-\u200D\u2060\uFEFF]$/u;
-const letter = /^\p{L}$/u;
+/** What parts two words without ink: spaces, the zero-width ones that come with pasted text, and the left-to-right mark. */
+const whiteSpace = /^[\s\u180E\u200B-\u200E\u2060]$/u;
+const letter = /^[\p{L}\p{M}]$/u;
+const visible = /^[\p{L}\p{N}\p{P}\p{S}]$/u;
 
 export type CharacterKind = "space" | "digit" | "point" | "comma" | "dash" | "plus" | "slash" | "feet" | "inch" | "fraction" | "letter" | "other";
 
@@ -33,7 +38,7 @@ export function kindOf(character: string): CharacterKind {
   if (character === ".") return "point";
   if (character === ",") return "comma";
   if (character === "+") return "plus";
-  if (dashes.includes(character)) return "dash";
+  if (dash.test(character)) return "dash";
   if (slashes.includes(character)) return "slash";
   if (feetMarks.includes(character)) return "feet";
   if (inchMarks.includes(character)) return "inch";
@@ -48,5 +53,10 @@ export function builtFraction(character: string): readonly [bigint, bigint] {
 }
 
 export function unitOf(word: string): LengthUnit | undefined {
-  return unitWords.get(word.toLowerCase());
+  return unitWords.get(word.normalize("NFD").replace(/\p{M}/gu, "").toLowerCase());
+}
+
+/** A character as a sentence can name it: itself, or `U+00AD` when it cannot be seen. */
+export function nameOf(character: string): string {
+  return visible.test(character) ? character : `U+${character.codePointAt(0)!.toString(16).toUpperCase().padStart(4, "0")}`;
 }

@@ -11,11 +11,13 @@ export interface LengthProblems {
   "unexpected-text": { found: string };
   /** It stops in the middle: `7/`, `28' 7/`. */
   incomplete: Record<string, never>;
+  /** A fraction finer than one over `limit`: no tape has it, and sums of such would grow without end. */
+  "too-fine": { limit: number };
   /** A fraction over nothing. */
   "zero-denominator": Record<string, never>;
   /** Inches of 12 or more after feet; `carried` is the same length written with the feet carried. */
   "inches-over-twelve": { carried: string };
-  /** `28.5' 7"`: the decimal foot already holds the inches. `decimal` and `whole` are the two ways to mean it. */
+  /** `28.5' 7"`: the decimal foot already holds the inches. `first` drops the inches, `second` the decimals. */
   "decimal-feet-then-inches": { first: string; second: string };
   /** `3 5/4`: `carried` is what it would add up to. */
   "improper-fraction": { carried: string };

@@ -1,6 +1,6 @@
 import Fraction from "fraction.js";
 import type { LengthUnit } from "./length";
-import { builtFraction, kindOf, unitOf } from "./length-characters";
+import { builtFraction, kindOf, nameOf, unitOf } from "./length-characters";
 import { LengthError } from "./length-error";
 
 /** A typed length cut into the few words it can have. `whole` tells `28` from `28.0`, since only a whole number can carry a fraction. */
@@ -27,6 +27,7 @@ export function tokenizeLength(text: string): TokenizedLength {
   const tokens: LengthToken[] = [];
   let position = 0;
   let steps = 0;
+  let ambiguous: LengthError | undefined;
 
   function kindHere() {
     steps += 1;
@@ -35,6 +36,7 @@ export function tokenizeLength(text: string): TokenizedLength {
   }
 
   function readNumber() {
+    const start = position;
     const groups: string[] = [""];
     const separators: string[] = [];
     for (let kind = kindHere(); kind === "digit" || kind === "point" || kind === "comma"; kind = kindHere()) {
@@ -46,7 +48,11 @@ export function tokenizeLength(text: string): TokenizedLength {
       }
       position += 1;
     }
-    tokens.push(numberToken(groups, separators));
+    const [first, second] = numberReadings(groups, separators);
+    tokens.push(first);
+    if (second === undefined || ambiguous !== undefined) return;
+    const inPlace = (number: string) => [...characters.slice(0, start), number, ...characters.slice(position)].join("").trim();
+    ambiguous = new LengthError("two-readings", { first: inPlace(first.text), second: inPlace(second) });
   }
 
   function readWord() {
@@ -58,7 +64,9 @@ export function tokenizeLength(text: string): TokenizedLength {
     const unit = unitOf(word);
     if (unit === undefined) throw new LengthError("unexpected-text", { found: word });
     tokens.push({ kind: "unit", unit });
-    if (kindHere() === "point") position += 1; // `ft.` and `in.` end in a stop
+    if (kindHere() !== "point") return;
+    position += 1; // `ft.` and `in.` end in a stop; `5 ft.5 in` may mean 5 or .5, so no digit may follow it
+    if (kindHere() === "digit") throw new LengthError("unexpected-text", { found: "." });
   }
 
   for (let kind = kindHere(); kind !== "end"; kind = kindHere()) {
@@ -75,33 +83,42 @@ export function tokenizeLength(text: string): TokenizedLength {
         if (doubled) position += 1;
         tokens.push({ kind: "unit", unit: doubled ? "in" : "ft" });
       } else if (kind === "plus") throw new LengthError("sign", {});
-      else if (kind !== "space") throw new LengthError("unexpected-text", { found: character });
+      else if (kind !== "space") throw new LengthError("unexpected-text", { found: nameOf(character) });
     }
   }
+  if (ambiguous !== undefined) throw ambiguous;
   return { tokens, steps };
 }
 
-/** Digits with their separators: `.` is the decimal point; `,` is one only where it cannot part thousands. */
-function numberToken(groups: string[], separators: string[]): LengthToken {
+type NumberToken = LengthToken & { kind: "number" };
+
+/**
+ * Digits with their separators: `.` is the decimal point; `,` is one only where it cannot part thousands. Where it can be
+ * either, the second reading comes along as text.
+ */
+function numberReadings(groups: readonly string[], separators: readonly string[]): [NumberToken, string?] {
   const written = groups.reduce((text, group, index) => text + separators[index - 1] + group);
-  const number = (text: string, whole: boolean): LengthToken => ({ kind: "number", value: new Fraction(text), whole, text });
-  if (groups.every((group) => group === "")) throw new LengthError("unexpected-text", { found: written });
+  const number = (text: string, whole: boolean): NumberToken => ({ kind: "number", value: new Fraction(text), whole, text });
+  const unexpected = () => new LengthError("unexpected-text", { found: written });
+  if (groups.every((group) => group === "")) throw unexpected();
   const [head = "", ...rest] = groups;
-  if (separators.length === 0) return number(head, true);
+  if (separators.length === 0) return [number(head, true)];
 
   const partsThousands = head.length >= 1 && head.length <= 3 && !head.startsWith("0");
   if (separators.length === 1) {
     const tail = rest[0] ?? "";
     const decimal = `${head || "0"}.${tail || "0"}`;
-    const ambiguous = separators[0] === "," && partsThousands && tail.length === 3;
-    if (ambiguous) throw new LengthError("two-readings", { first: head + tail, second: decimal });
-    return number(decimal, false);
+    if (separators[0] === "." || tail.length !== 3 || !partsThousands) {
+      if (separators[0] === "," && tail === "") throw unexpected();
+      return [number(decimal, false)];
+    }
+    return [number(head + tail, true), decimal];
   }
 
   const decimals = separators.at(-1) === "." ? (rest.at(-1) ?? "") : null;
   const thousands = decimals === null ? rest : rest.slice(0, -1);
   const commas = decimals === null ? separators : separators.slice(0, -1);
   const grouped = partsThousands && commas.every((mark) => mark === ",") && thousands.every((group) => group.length === 3);
-  if (!grouped) throw new LengthError("unexpected-text", { found: written });
-  return number(head + thousands.join("") + (decimals === null ? "" : `.${decimals || "0"}`), decimals === null);
+  if (!grouped) throw unexpected();
+  return [number(head + thousands.join("") + (decimals === null ? "" : `.${decimals || "0"}`), decimals === null)];
 }

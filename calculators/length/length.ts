@@ -29,7 +29,10 @@ function exactDecimal(value: number): Fraction {
 export class Length {
   static readonly zero = new Length(new Fraction(0));
 
-  private constructor(readonly inches: Fraction) {}
+  private constructor(readonly inches: Fraction) {
+    Object.freeze(inches);
+    Object.freeze(this);
+  }
 
   /** `value` may be a number (taken as the decimal it prints as), or an exact fraction. */
   static from(value: number | Fraction, unit: LengthUnit = "in"): Length {
@@ -90,9 +93,9 @@ export class Length {
     return this.inches.div(inchesPerUnit[unit]);
   }
 
-  /** The nearest double, in inches. */
-  toNumber(): number {
-    return this.inches.valueOf();
+  /** The count as a double, right to two units in its last place. */
+  toNumber(unit: LengthUnit = "in"): number {
+    return toDouble(this.in(unit));
   }
 
   /** Exact inches as `687/2` or `336`. */
@@ -112,18 +115,25 @@ export function squareRoot(squareInches: Fraction): Length | number {
   const top = wholeRoot(squareInches.n);
   const bottom = wholeRoot(squareInches.d);
   if (top !== null && bottom !== null) return Length.from(new Fraction(top, bottom));
-  return Math.sqrt(squareInches.valueOf());
+  return Math.sqrt(toDouble(squareInches));
+}
+
+/** A sum of many unlike fractions outgrows the doubles above and below the line long before it does as a whole. */
+function toDouble(value: Fraction): number {
+  return Math.max(bitsOf(value.n), bitsOf(value.d)) < 1000 ? value.valueOf() : (Number(value.s) * Number((value.n << 64n) / value.d)) / 2 ** 64;
+}
+
+function bitsOf(value: bigint): number {
+  return value.toString(16).length * 4;
 }
 
 /** The whole square root, or null when there is none; Newton's steps on whole numbers. */
 function wholeRoot(value: bigint): bigint | null {
   if (value < 2n) return value;
-  let guess = BigInt(Math.floor(Math.sqrt(Number(value))));
-  for (let step = 0; step < 64; step += 1) {
+  let guess = 1n << BigInt(Math.ceil(bitsOf(value) / 2)); // no less than the root, and from above the steps only fall
+  for (;;) {
     const next = (guess + value / guess) / 2n;
-    if (next === guess || next === guess + 1n) break;
+    if (next >= guess) return guess * guess === value ? guess : null;
     guess = next;
   }
-  for (const root of [guess - 1n, guess, guess + 1n]) if (root * root === value) return root;
-  return null;
 }

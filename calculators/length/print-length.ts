@@ -87,5 +87,7 @@ function printInches(size: Length, style: LengthStyle): string {
   const feet = style === "feet-inches" ? size.inches.div(12).floor() : new Fraction(0);
   const inches = size.inches.sub(feet.mul(12));
   const inchText = `${inches.toFraction(true)}"`;
-  return feet.n === 0n ? inchText : `${feet.toString()}' ${inchText}`;
+  if (feet.n === 0n) return inchText;
+  // `7' 0 7/8"`: the 0 stands, since `7' 7/8"` is too near `7' 7 8"` on a phone in the sun
+  return `${feet.toString()}' ${inches.n !== 0n && inches.compare(1) < 0 ? `0 ${inchText}` : inchText}`;
 }

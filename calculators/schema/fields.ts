@@ -1,3 +1,4 @@
+import type Fraction from "fraction.js";
 import { z } from "zod";
 import { Length, LengthError, lengthUnits, precisions, readLength, ReadLength, type LengthUnit } from "../length";
 
@@ -67,35 +68,61 @@ export function flagField({ description }: { description: string }) {
     .transform((raw): boolean => raw === true || raw === "true");
 }
 
+/** One of a few words; missing is told as `required`. */
+export function choiceField<const Options extends readonly string[]>(options: Options, { description }: { description: string }) {
+  return z.enum(options, { error: (issue) => (issue.input === undefined ? "required" : undefined) }).meta({ description });
+}
+
 /** Fields of every calculator's input. */
 const commonFields = {
   unit: z.enum(lengthUnits).default("in").meta({ description: "What a bare number means" }),
   precision: z.enum(precisions).default("1/16").meta({ description: "What texts are rounded to" }),
 };
 
-type Settled<T> = T extends ReadLength ? Length : T extends readonly (infer Item)[] ? Settled<Item>[] : T extends object ? { [Key in keyof T]: Settled<T[Key]> } : T;
+type Settled<T> = T extends ReadLength
+  ? Length
+  : T extends Fraction
+    ? Fraction
+    : T extends readonly (infer Item)[]
+      ? Settled<Item>[]
+      : T extends object
+        ? { [Key in keyof T]: Settled<T[Key]> }
+        : T;
 
 /**
  * The input of a calculator: `shape` with `unit` and `precision` beside it, unknown fields refused, every length
- * settled in its unit.
+ * settled in its unit. A length out of range is told together with the other faults.
  */
 export function calculatorInput<Shape extends z.ZodRawShape>(shape: Shape) {
-  return z.strictObject({ ...commonFields, ...shape }).transform((value, context) => {
-    const settle = (part: unknown, path: PropertyKey[]): unknown => {
-      if (part instanceof ReadLength) return settleLength(part, (value as { unit: LengthUnit }).unit, path);
-      if (Array.isArray(part)) return part.map((item, index) => settle(item, [...path, index]));
-      if (part === null || typeof part !== "object") return part;
-      return Object.fromEntries(Object.entries(part).map(([key, item]) => [key, settle(item, [...path, key])]));
-    };
-    const settleLength = (read: ReadLength, unit: LengthUnit, path: PropertyKey[]): Length => {
-      try {
-        return read.in(unit);
-      } catch (error) {
-        if (!(error instanceof LengthError)) throw error;
-        context.issues.push({ code: "custom", input: undefined, path, params: { code: error.code, params: error.params } });
-        return Length.zero;
-      }
-    };
-    return settle(value, []) as Settled<typeof value>;
-  });
+  return z
+    .strictObject({ ...commonFields, ...shape })
+    .superRefine(
+      (value, context) => {
+        const unit = unitOf(value);
+        mapLengths(value, [], (read, path) => {
+          try {
+            return read.in(unit);
+          } catch (error) {
+            if (!(error instanceof LengthError)) throw error;
+            context.issues.push({ code: "custom", input: undefined, path, params: { code: error.code, params: error.params } });
+            return Length.zero;
+          }
+        });
+      },
+      { when: () => true },
+    )
+    .transform((value) => mapLengths(value, [], (read) => read.in(unitOf(value))) as Settled<typeof value>);
+}
+
+/** The unit asked for, or inches while that field itself is at fault. */
+function unitOf(value: unknown): LengthUnit {
+  const unit = commonFields.unit.safeParse((value as { unit?: unknown } | null)?.unit);
+  return unit.success ? unit.data : "in";
+}
+
+function mapLengths(part: unknown, path: PropertyKey[], settle: (read: ReadLength, path: PropertyKey[]) => Length): unknown {
+  if (part instanceof ReadLength) return settle(part, path);
+  if (Array.isArray(part)) return part.map((item, index) => mapLengths(item, [...path, index], settle));
+  if (part === null || typeof part !== "object" || Object.getPrototypeOf(part) !== Object.prototype) return part;
+  return Object.fromEntries(Object.entries(part).map(([key, item]) => [key, mapLengths(item, [...path, key], settle)]));
 }

@@ -41,7 +41,7 @@ function translate(issue: z.core.$ZodIssue, above: readonly PropertyKey[] = []):
       return meant === undefined ? at(issue.message) : meant.flatMap((inner) => translate(inner, path));
     }
     case "invalid_value":
-      return at("not-one-of", { options: issue.values.map(String).join(", ") });
+      return issue.message === "required" ? at("required") : at("not-one-of", { options: issue.values.map(String).join(", ") });
     case "too_small":
       return at(issue.origin === "array" ? "too-few" : "too-small", { minimum: Number(issue.minimum) });
     case "too_big":

@@ -19,5 +19,5 @@ export function measure(value: Length | number, precision: Precision, style?: Le
   const text = printLength(value, precision, style);
   const { lean } = roundLength(value, precision);
   if (typeof value === "number") return { in: value, exact: null, text, mm: value * 25.4, lean };
-  return { in: value.toNumber(), exact: value.toString(), text, mm: value.in("mm").valueOf(), lean };
+  return { in: value.toNumber(), exact: value.toString(), text, mm: value.toNumber("mm"), lean };
 }
