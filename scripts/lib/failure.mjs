@@ -10,6 +10,6 @@ export class Failure extends Error {
 /** The sentence for a full disk, or undefined when the error is about something else. */
 export function diskFull(error, folder) {
   const text = `${error?.code ?? ""} ${error?.message ?? error ?? ""} ${error?.details ?? ""}`;
-  if (!/ENOSPC|No space left|errno: 28\b|Error code: 28\b/i.test(text)) return undefined;
+  if (!/ENOSPC|No space left|\b(errno|errcode|error|error code):? 28\b/i.test(text)) return undefined;
   return new Failure(`The disk that holds ${folder} is full: free at least 2 GB there and start again.`);
 }

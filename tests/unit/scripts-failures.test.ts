@@ -35,7 +35,7 @@ describe("an unfit machine is told in one sentence what to do", () => {
   });
 
   test("a disk that fills up meanwhile, whoever hits it first", () => {
-    for (const error of [{ code: "ENOSPC" }, { message: "npm error code ENOSPC" }, { message: "MariaDB", details: "Error writing file './x' (Errcode: 28 \"No space left on device\")" }])
+    for (const error of [{ code: "ENOSPC" }, { message: "npm error code ENOSPC" }, { message: "MariaDB", details: "Error writing file './x' (Errcode: 28 \"No space left on device\")" }, { details: "[ERROR] InnoDB: preallocating 100663296 bytes for file ./ib_logfile101 failed with error 28" }])
       expect(diskFull(error, "/srv/sillwright")?.message).toBe("The disk that holds /srv/sillwright is full: free at least 2 GB there and start again.");
     expect(diskFull(new Error("28 rows"), "/srv")).toBeUndefined();
   });
