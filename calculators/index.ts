@@ -1,7 +1,10 @@
+import { inset } from "./inset";
 import type { Calculator, Operation } from "./schema";
 
 /** Every calculator, in the order of the job. Pages, API, OpenAPI, short links and tests read this list. */
-export const calculators: readonly Calculator[] = [];
+export const calculators: readonly Calculator[] = [
+  inset,
+];
 
 /** Every operation of the API by its path under /api/v1. */
 export const operations: ReadonlyMap<string, Operation> = new Map(
