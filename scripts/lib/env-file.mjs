@@ -1,6 +1,10 @@
 import { readFileSync } from "node:fs";
 
-/** Takes `NAME=value` lines into the environment where it does not have them yet. Node's own loader came after 20.9. */
+/**
+ * Takes `NAME=value` lines into the environment where it does not have them yet. Node's own loader came after 20.9.
+ * @param {string} file
+ * @param {Record<string, string | undefined>} environment
+ */
 export function loadEnvFile(file, environment = process.env) {
   let text;
   try {

@@ -26,6 +26,7 @@ await lifecycle(async (keep, isStopping) => {
     return keep(await startSite({ folder, host: own.host, port, environment: { SITE_URL: own.siteUrl ?? addressOf(own.host, port), ...environment }, keepAlive: own.keepAlive, runDir: own.runDir, logDir: own.logDir }));
   });
 
-  console.log(`\nSillwright runs at ${site.address} after ${((Date.now() - began) / 1000).toFixed(1)} s. Logs are in ${path.relative(process.cwd(), own.logDir) || own.logDir}. Ctrl-C stops it.`);
+  const elsewhere = own.siteUrl && own.siteUrl !== site.address ? ` (for others: ${own.siteUrl})` : "";
+  console.log(`\nSillwright runs at ${site.address}${elsewhere} after ${((Date.now() - began) / 1000).toFixed(1)} s. Logs are in ${path.relative(process.cwd(), own.logDir) || own.logDir}. Ctrl-C stops it.`);
   await supervise({ site, ...started }, isStopping);
 });
