@@ -1,9 +1,11 @@
+import { conversions } from "./conversions";
 import { inset } from "./inset";
 import type { Calculator, Operation } from "./schema";
 
 /** Every calculator, in the order of the job. Pages, API, OpenAPI, short links and tests read this list. */
 export const calculators: readonly Calculator[] = [
   inset,
+  conversions,
 ];
 
 /** Every operation of the API by its path under /api/v1. */

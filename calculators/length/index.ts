@@ -2,6 +2,6 @@ export { Length, squareRoot, lengthUnits, type LengthUnit } from "./length";
 export { LengthError, type LengthProblemCode, type LengthProblems } from "./length-error";
 export { characterLimit, parseLength, readLength } from "./parse-length";
 export { LengthReader } from "./length-reader";
-export { ReadLength } from "./read-length";
+export { rangeLimit, ReadLength } from "./read-length";
 export { tokenizeLength } from "./length-tokens";
-export { graduation, isMetric, precisions, printExact, printLength, roundLength, type Lean, type LengthStyle, type Precision } from "./print-length";
+export { graduation, isMetric, precisions, printExact, printLength, roundLength, roundTo, type Lean, type LengthStyle, type Precision } from "./print-length";

@@ -49,14 +49,18 @@ export function roundLength(value: Length | number, precision: Precision): { rou
     const remainder = value - rounded.toNumber();
     return { rounded, lean: Math.abs(remainder) < indistinct ? "exact" : remainder > 0 ? "strong" : "scant" };
   }
-  const ratio = value.inches.div(step.inches);
-  const below = ratio.floor();
-  const twice = ratio.sub(below).mul(2);
-  const comparison = twice.compare(1);
-  const up = comparison > 0 || (comparison === 0 && below.n % 2n === 1n);
-  const rounded = step.times(up ? below.add(1) : below);
+  const rounded = roundTo(value, step);
   const sign = value.compare(rounded);
   return { rounded, lean: sign === 0 ? "exact" : sign > 0 ? "strong" : "scant" };
+}
+
+/** The nearest multiple of `step`; a tie goes to the even one. */
+export function roundTo(value: Length, step: Length): Length {
+  const ratio = value.inches.div(step.inches);
+  const below = ratio.floor();
+  const comparison = ratio.sub(below).mul(2).compare(1);
+  const up = comparison > 0 || (comparison === 0 && below.n % 2n === 1n);
+  return step.times(up ? below.add(1) : below);
 }
 
 function evenRound(value: number): number {

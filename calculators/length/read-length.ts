@@ -2,7 +2,8 @@ import type Fraction from "fraction.js";
 import { Length, type LengthUnit } from "./length";
 import { LengthError } from "./length-error";
 
-const rangeLimit = Length.from(10_000, "ft");
+/** The longest length that is read, either way. */
+export const rangeLimit = Length.from(10_000, "ft");
 
 /** A length as read, before the field's unit is known: `bare` is a number with no unit of its own. Immutable. */
 export class ReadLength {
