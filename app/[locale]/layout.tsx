@@ -44,7 +44,7 @@ export default async function Layout({ children, params }: { children: ReactNode
         <script dangerouslySetInnerHTML={{ __html: settingsScript }} />
       </head>
       <body>
-        <MessagesProvider locale={locale} messages={loadMessages(locale, ["common"])}>
+        <MessagesProvider locale={locale} messages={loadMessages(locale, ["common", "failure"])}>
           <SiteHeader t={t} />
           {children}
           <SiteFooter t={t} />

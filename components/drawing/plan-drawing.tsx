@@ -3,7 +3,7 @@
 import { useId, type ReactNode } from "react";
 import { useTranslate } from "@/lib/client/i18n/messages-context";
 import { Chalk, Concrete, CornerLetter, Dimension, MoveArrow, Pull } from "./plan-parts";
-import { cornerNames, exaggerated, exaggeration, frameFor, pathOf, rectangleOf, type Corners, type Point } from "./plan-geometry";
+import { cornerNames, exaggerated, exaggeration, frameFor, insetPixels, pathOf, rectangleOf, type Corners, type Point } from "./plan-geometry";
 
 export interface PlanDrawingProps {
   /** The sides, in inches: the drawing is to their scale. */

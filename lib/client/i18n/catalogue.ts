@@ -4,6 +4,7 @@ import enCommon from "../messages/en/common.json";
 import enConversions from "../messages/en/conversions.json";
 import enCorner from "../messages/en/corner.json";
 import enErrors from "../messages/en/errors.json";
+import enFailure from "../messages/en/failure.json";
 import enHome from "../messages/en/home.json";
 import enInset from "../messages/en/inset.json";
 import enLegal from "../messages/en/legal.json";
@@ -14,13 +15,14 @@ import esCommon from "../messages/es/common.json";
 import esConversions from "../messages/es/conversions.json";
 import esCorner from "../messages/es/corner.json";
 import esErrors from "../messages/es/errors.json";
+import esFailure from "../messages/es/failure.json";
 import esHome from "../messages/es/home.json";
 import esInset from "../messages/es/inset.json";
 import esLegal from "../messages/es/legal.json";
 import esSquareness from "../messages/es/squareness.json";
 import type { Locale } from "./locales";
 
-export const namespaces = ["common", "cautions", "errors", "home", "legal", "squareness", "corner", "inset", "anchors", "conversions"] as const;
+export const namespaces = ["common", "cautions", "errors", "failure", "home", "legal", "squareness", "corner", "inset", "anchors", "conversions"] as const;
 export type Namespace = (typeof namespaces)[number];
 
 /** A namespace's messages as written: sentences in ICU MessageFormat under nested keys. */
@@ -32,6 +34,7 @@ export const catalogue: Readonly<Record<Locale, Readonly<Record<Namespace, Messa
     common: enCommon,
     cautions: enCautions,
     errors: enErrors,
+    failure: enFailure,
     home: enHome,
     legal: enLegal,
     squareness: enSquareness,
@@ -44,6 +47,7 @@ export const catalogue: Readonly<Record<Locale, Readonly<Record<Namespace, Messa
     common: esCommon,
     cautions: esCautions,
     errors: esErrors,
+    failure: esFailure,
     home: esHome,
     legal: esLegal,
     squareness: esSquareness,

@@ -5,8 +5,8 @@ import { catalogue, type MessageTree, type Namespace } from "./catalogue";
 import type { Locale } from "./locales";
 import { createTranslate, type Messages, type Translate } from "./translate";
 
-/** Compiled once a process: a static page needs them at build only, an answer page at every request. */
-const compiled = new Map<string, Messages>();
+/** Compiled once for each tree: a static page needs them at build only, an answer page at every request. */
+const compiled = new WeakMap<MessageTree, Messages>();
 
 /** The compiled messages of some namespaces, keyed `namespace.key`: plain JSON, fit to be a prop. `under` keeps only keys that begin so (`["squareness.form"]`). */
 export function loadMessages(locale: Locale, namespaces: readonly Namespace[], under?: readonly string[]): Messages {
@@ -21,8 +21,8 @@ export function getTranslate(locale: Locale, namespaces: readonly Namespace[]): 
 }
 
 function compileNamespace(locale: Locale, namespace: Namespace): Messages {
-  const cacheKey = `${locale} ${namespace}`;
-  const known = compiled.get(cacheKey);
+  const source = catalogue[locale][namespace];
+  const known = compiled.get(source);
   if (known !== undefined) return known;
   const messages: Record<string, CompiledMessage> = {};
   const walk = (tree: MessageTree, prefix: string): void => {
@@ -31,8 +31,8 @@ function compileNamespace(locale: Locale, namespace: Namespace): Messages {
       else walk(message, `${prefix}.${key}`);
     }
   };
-  walk(catalogue[locale][namespace], namespace);
-  compiled.set(cacheKey, messages);
+  walk(source, namespace);
+  compiled.set(source, messages);
   return messages;
 }
 
