@@ -28,7 +28,11 @@ const config = {
         { source: "/", destination: "/en" },
         { source: `/:path((?!(?:${reserved})(?:/|$))[^.]*)`, destination: "/en/:path" },
       ],
-      fallback: [],
+      // What no page answers: the prerendered page that says so, in the address's language and with status 404.
+      fallback: [
+        { source: "/es/:path*", destination: "/es/missing" },
+        { source: "/:path((?!(?:api|_next)(?:/|$)).*)", destination: "/en/missing" },
+      ],
     };
   },
   async redirects() {

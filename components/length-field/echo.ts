@@ -1,6 +1,7 @@
 import type { LengthUnit, Precision } from "@/calculators/length";
+import type * as lengthCore from "@/lib/client/core/length";
 
-export type LengthCore = typeof import("@/lib/client/core/length");
+export type LengthCore = typeof lengthCore;
 
 /** What the right end of a field says of the text typed so far. */
 export interface Echo {

@@ -1,8 +1,9 @@
 "use client";
 
 import { useEffect, useSyncExternalStore } from "react";
+import type * as lengthCore from "./length";
 
-type LengthCore = typeof import("./length");
+type LengthCore = typeof lengthCore;
 
 let core: LengthCore | null = null;
 let loading: Promise<void> | null = null;

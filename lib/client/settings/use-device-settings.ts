@@ -1,6 +1,6 @@
 "use client";
 
-import { useCallback, useSyncExternalStore } from "react";
+import { useSyncExternalStore } from "react";
 import { defaultSettings, precisionOf, readSettings, settingsKey, unitOf, type DeviceSettings } from "./device-settings";
 
 const listeners = new Set<() => void>();
@@ -70,6 +70,5 @@ export function changeSettings(change: Partial<DeviceSettings>): void {
  */
 export function useDeviceSettings() {
   const settings = useSyncExternalStore(subscribe, snapshot, () => defaultSettings);
-  const change = useCallback(changeSettings, []);
-  return { ...settings, unit: unitOf(settings.units), precision: precisionOf(settings), change };
+  return { ...settings, unit: unitOf(settings.units), precision: precisionOf(settings), change: changeSettings };
 }
