@@ -22,7 +22,6 @@ export function MissingNotice() {
   const t = useTranslate();
   return (
     <main id="main" tabIndex={-1} className="page page-narrow prose">
-      <title>{`${t("common.missing.title")} · ${t("common.name")}`}</title>
       <MissingDrawing />
       <h1>{t("common.missing.title")}</h1>
       <p>{t("common.missing.text")}</p>

@@ -48,7 +48,7 @@ function htmlFiles(folder) {
 
 /**
  * Writes each prerendered page's policy into the `.meta` file beside it, whose headers Next's server sends with the page, in
- * every build folder given. Answers how many pages there are.
+ * every build folder given, and the status of the page for addresses that have none. Answers how many pages there are.
  */
 export function writeSecurityHeaders(buildFolders) {
   let pages = 0;
@@ -59,6 +59,8 @@ export function writeSecurityHeaders(buildFolders) {
       const policy = policyFor(readFileSync(path.join(app, file), "utf8"), address);
       const metaFile = path.join(app, file.replace(/\.html$/, ".meta"));
       const meta = existsSync(metaFile) ? JSON.parse(readFileSync(metaFile, "utf8")) : {};
+      // A page that called notFound() would be prerendered empty and drawn by script; this one is written out, and only its status is said here.
+      if (path.basename(file) === "missing.html") meta.status = 404;
       meta.headers = { ...meta.headers, "content-security-policy": policy };
       writeFileSync(metaFile, JSON.stringify(meta));
       if (index === 0) pages += 1;
