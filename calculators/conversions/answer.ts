@@ -10,7 +10,7 @@ export type PrintedForm = z.output<typeof printedForm>;
 export const decimalForm = z
   .strictObject({
     value: z.number().meta({ description: "Unrounded" }),
-    text: z.string().meta({ description: "Rounded once; a tie goes to the even last figure" }),
+    text: z.string().meta({ description: "Rounded once: a tie goes up in decimal feet and inches, as in printed tables, and to the even graduation in metric" }),
     errorIn,
   })
   .meta({ id: "DecimalForm", description: "A length as a decimal number of one unit", example: { value: 8.276041666666666, text: "8.2760 ft", errorIn: -0.0005 } });

@@ -1,4 +1,4 @@
-import { graduation, isMetric, Length, roundLength, type LengthStyle, type Precision } from "../length";
+import { graduation, isMetric, Length, roundLength, type LengthStyle, type LengthUnit, type Precision } from "../length";
 import { CalculationError, measure } from "../schema";
 import type { ConversionsAnswer, PrintedForm } from "./answer";
 import { decimalForm } from "./decimal-form";
@@ -23,17 +23,18 @@ export function convert({ value, strip, spaces, precision }: ConversionsInput): 
   if (total === undefined) throw new CalculationError([{ pointer: "/value", code: "nothing-to-convert", params: {} }]);
 
   const inchPrecision = isMetric(precision) ? "1/16" : precision;
-  const metricStep = isMetric(precision) ? graduation(precision) : tenthMillimetre;
-  const places = precision === "1mm" ? 0 : 1;
+  const decimal = (unit: LengthUnit) => decimalForm(total, unit, { step: Length.from(0.0001, unit), places: 4, ties: "up" });
+  const metric = (unit: LengthUnit, shift: number) =>
+    decimalForm(total, unit, { step: isMetric(precision) ? graduation(precision) : tenthMillimetre, places: shift + (precision === "1mm" ? 0 : 1), ties: "even" });
   return {
     total: measure(total, precision),
     feetInches: printedForm(total, inchPrecision, "feet-inches"),
     inches: printedForm(total, inchPrecision, "inches"),
-    decimalFeet: decimalForm(total, "ft", Length.from(0.0001, "ft"), 4),
-    decimalInches: decimalForm(total, "in", Length.from(0.0001), 4),
-    millimetres: decimalForm(total, "mm", metricStep, places),
-    centimetres: decimalForm(total, "cm", metricStep, places + 1),
-    metres: decimalForm(total, "m", metricStep, places + 3),
+    decimalFeet: decimal("ft"),
+    decimalInches: decimal("in"),
+    millimetres: metric("mm", 0),
+    centimetres: metric("cm", 1),
+    metres: metric("m", 3),
     strip:
       strip?.map((line, index) => ({
         op: line.op,

@@ -47,7 +47,7 @@ export function numberField({ minimum, maximum, whole = false, description, exam
     .meta({ description, examples: [example] })
     .transform((raw, context): number => {
       const text = typeof raw === "string" ? raw.trim() : String(raw);
-      const value = text.length <= 32 && /^[-\u2212]?(\d+(\.\d*)?|\.\d+)(e[+-]?\d+)?$/i.test(text) ? Number(text.replace("\u2212", "-")) : NaN;
+      const value = text.length <= 32 && /^[-\u2212]?(\d+(\.\d*)?|\.\d+)(e[+-]?\d+)?$/i.test(text) ? Number(text.replace("\u2212", "-")) + 0 : NaN; // + 0 turns −0 into 0
       const refuse = (code: string, params: object = {}) => {
         context.issues.push({ code: "custom", input: raw, params: { code, params } });
         return z.NEVER;
