@@ -20,8 +20,8 @@ export default defineConfig({
     screenshot: "only-on-failure",
     launchOptions: {
       executablePath: "/usr/bin/chromium",
-      // No sandbox, since tests may run as root; the rest keeps Chromium from calling home.
-      args: ["--no-sandbox", "--disable-gpu", "--disable-quic", "--no-first-run", "--disable-background-networking", "--disable-component-update", "--disable-sync"],
+      // No sandbox, since tests may run as root; little shared memory, as in a container; the rest keeps Chromium from calling home.
+      args: ["--no-sandbox", "--disable-gpu", "--disable-quic", "--no-first-run", "--disable-background-networking", "--disable-component-update", "--disable-sync", "--disable-dev-shm-usage"],
     },
   },
   projects: [
