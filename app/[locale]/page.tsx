@@ -1,4 +1,5 @@
 import { CalculatorTiles } from "@/components/site/calculator-tiles";
+import { apiAnswer, apiRequest } from "@/components/site/home-example";
 import { HeroPlan } from "@/components/site/hero-plan";
 import { pageMetadata } from "@/components/site/page-metadata";
 import { ButtonLink } from "@/components/ui/button";
@@ -11,18 +12,6 @@ export async function generateMetadata(props: LocaleProps) {
   const t = getTranslate(locale, ["home"]);
   return pageMetadata(locale, "/", t("home.meta.title"), t("home.meta.description"));
 }
-
-/** Real request, shortened answer: tests/unit/home-example.test.ts asks the core the same and compares. */
-const apiRequest = `POST /api/v1/squareness
-{ "length": "28'", "width": "22'",
-  "diagonals": { "ac": "428 9/16",
-                 "bd": "428 1/16" },
-  "burn": "1" }`;
-const apiAnswer = `{ "shape": "racked",
-  "difference": { "text": "1/2\\"", … },
-  "rack": { "side": "CD", "toward": "D",
-    "distance": { "text": "5/16\\"",
-                  "lean": "strong", … } }, … }`;
 
 const reasons = ["exact", "burn", "prove", "sun", "local"] as const;
 

@@ -1,3 +1,4 @@
+import AxeBuilder from "@axe-core/playwright";
 import { expect, test, type Page } from "@playwright/test";
 
 const paths = ["/", "/calculators", "/privacy", "/terms", "/accessibility", "/contact"];
@@ -50,6 +51,17 @@ for (const address of addresses) {
     await openMenu(page);
     expect(await smallTargets(page)).toEqual([]);
   });
+}
+
+for (const theme of ["light", "dark", "sun"]) {
+  for (const address of ["/", "/es/calculators", "/accessibility", "/no-such-page"]) {
+    test(`${address} passes axe up to AAA contrast in the theme ${theme} @phone`, async ({ page }) => {
+      await page.addInitScript((chosen) => localStorage.setItem("sillwright.settings", JSON.stringify({ theme: chosen })), theme);
+      await page.goto(address);
+      const { violations } = await new AxeBuilder({ page }).withTags(["wcag2a", "wcag2aa", "wcag21aa", "wcag22aa", "best-practice"]).options({ rules: { "color-contrast-enhanced": { enabled: true } } }).analyze();
+      expect(violations.map(({ id, nodes }) => `${id}: ${nodes.map(({ html }) => html).join(" ")}`)).toEqual([]);
+    });
+  }
 }
 
 /** Links inside a sentence are exempt (WCAG 2.5.5, inline); a radio's target is its label, a tile's link covers the tile. */

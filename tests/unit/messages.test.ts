@@ -39,7 +39,6 @@ describe("every message", () => {
 
 test.each(["archivo", "atkinson-next", "atkinson-mono"])("every character of the messages is in the shipped font %s", (name) => {
   const font = fontkit.openSync(`app/fonts/${name}.woff2`);
-  if (!("hasGlyphForCodePoint" in font)) throw new Error("a collection, not a font");
   const characters = new Set([...english.values(), ...spanish.values()].join(""));
   const missing = [...characters].filter((character) => character !== "\n" && !font.hasGlyphForCodePoint(character.codePointAt(0)!));
   expect(missing).toEqual([]);

@@ -2,9 +2,9 @@ import { renderToStaticMarkup } from "react-dom/server";
 import { describe, expect, test } from "vitest";
 import { loadMessages } from "@/lib/client/i18n/load-messages";
 import { localePath, pathWithoutLocale } from "@/lib/client/i18n/locales";
-import { createTranslate } from "@/lib/client/i18n/translate";
+import { createTranslate, type Messages } from "@/lib/client/i18n/translate";
 
-const messages = {
+const messages: Messages = {
   "test.plain": "Pull both diagonals.",
   "test.named": ["Move side ", ["side"], " ", ["length"], "."],
   "test.bold": ["Move it ", ["b", ["length"]], " toward ", ["corner"]],
