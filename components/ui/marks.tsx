@@ -31,6 +31,16 @@ export function WarnMark() {
   );
 }
 
+/** A piece of tape. */
+export function TapeMark() {
+  return (
+    <svg {...frame}>
+      <rect x="1" y="5" width="24" height="16" fill="var(--chalk)" />
+      <path d="M5 5v9M9 5v5M13 5v9M17 5v5M21 5v9" fill="none" stroke="var(--on-chalk)" strokeWidth="2" />
+    </svg>
+  );
+}
+
 /** A square not yet drawn. */
 export function IdleMark() {
   return (

@@ -1,11 +1,12 @@
 "use client";
 
 import { useEffect, useRef, useState, type ReactNode } from "react";
-import { GoodMark, IdleMark, OutMark, WarnMark } from "./marks";
+import { GoodMark, IdleMark, OutMark, TapeMark, WarnMark } from "./marks";
 
-export type VerdictTone = "good" | "out" | "warn" | "idle";
+/** `plain` is an answer that judges nothing, such as a converted length; `idle` is no answer yet. */
+export type VerdictTone = "good" | "out" | "warn" | "plain" | "idle";
 
-const marks = { good: GoodMark, out: OutMark, warn: WarnMark, idle: IdleMark } as const;
+const marks = { good: GoodMark, out: OutMark, warn: WarnMark, plain: TapeMark, idle: IdleMark } as const;
 
 /** How long typing must rest before the answer is spoken. */
 const restMilliseconds = 700;

@@ -35,12 +35,15 @@ export function queryFromForm({ fields, unit, precision }: FormState): URLSearch
 /** A number without a unit or a mark of its own; a dash inside makes it feet and inches. */
 const bareNumber = /^\s*[-\u2010-\u2015\u2212]?[\d\s.,/\u2044\u00BC-\u00BE\u2150-\u215E]+$/;
 
+/** Whether a field holds a length; `fields` for a field whose meaning another decides. */
+export type IsLength = (name: string, fields: Fields) => boolean;
+
 /** The form under another unit: bare numbers keep their meaning by taking the old unit as their own, so `336` becomes `336 in`. */
-export function inUnit(form: FormState, unit: LengthUnit, precision: Precision, isLength: (name: string) => boolean): FormState {
+export function inUnit(form: FormState, unit: LengthUnit, precision: Precision, isLength: IsLength): FormState {
   if (form.unit === unit) return { ...form, precision };
   const keepMeaning = ([name, text]: [string, string]): [string, string] => [
     name,
-    isLength(name) && /[\d\u00BC-\u00BE\u2150-\u215E]/.test(text) && bareNumber.test(text) ? `${text.trim()} ${form.unit}` : text,
+    isLength(name, form.fields) && /[\d\u00BC-\u00BE\u2150-\u215E]/.test(text) && bareNumber.test(text) ? `${text.trim()} ${form.unit}` : text,
   ];
   return { fields: Object.fromEntries(Object.entries(form.fields).map(keepMeaning)), unit, precision };
 }

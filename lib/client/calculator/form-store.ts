@@ -1,5 +1,5 @@
 import type { LengthUnit, Precision } from "@/calculators/length";
-import { defaultPrecision, formFromQuery, queryFromForm, inUnit, type FormState } from "./form-fields";
+import { defaultPrecision, formFromQuery, queryFromForm, inUnit, type FormState, type IsLength } from "./form-fields";
 
 /** Safari allows 100 address changes in 30 s; a pause of this many milliseconds after the last key stays far below. */
 const addressPause = 400;
@@ -36,7 +36,7 @@ export function createFormStore(initial: FormState) {
     /** Writes the address now: before leaving it by a link, or copying it. */
     flush: writeAddress,
     /** Takes the device's unit and precision. The first time, an address's own precision stands while it is of the device's system. */
-    adopt(unit: LengthUnit, precision: Precision, isLength: (name: string) => boolean): void {
+    adopt(unit: LengthUnit, precision: Precision, isLength: IsLength): void {
       if (adopted?.unit === unit && adopted.precision === precision) return;
       const fromAddress = adopted === null && state.precision !== defaultPrecision && state.precision.endsWith("mm") === precision.endsWith("mm");
       adopted = { unit, precision };

@@ -10,7 +10,7 @@ import { useTranslate } from "@/lib/client/i18n/messages-context";
 import { precisionOf, unitOf } from "@/lib/client/settings/device-settings";
 import { deviceSettings, useDeviceSettings } from "@/lib/client/settings/use-device-settings";
 import { fieldId } from "./field-id";
-import { defaultPrecision, defaultUnit, queryFromForm, rowCount, withoutRow, type Fields, type FormState } from "./form-fields";
+import { defaultPrecision, defaultUnit, queryFromForm, rowCount, withoutRow, type Fields, type FormState, type IsLength } from "./form-fields";
 import { createFormStore } from "./form-store";
 
 /** What an answer page worked out on the server: the form as sent, and its answer or issues. */
@@ -31,7 +31,7 @@ interface Options<Answer> {
   /** Fetches the operation: `() => import("./core").then(({ loaded }) => loaded)`; called once, after first paint. */
   load: () => Promise<LoadedOperation>;
   /** Whether a field holds a length, so that a change of unit keeps its meaning. */
-  isLength: (name: string) => boolean;
+  isLength: IsLength;
   /** Fields a fresh page starts with. */
   defaults?: Fields;
   initial?: Initial<Answer>;

@@ -1,0 +1,64 @@
+"use client";
+
+import type { ConversionsAnswer } from "@/calculators/conversions";
+import type { Precision } from "@/calculators/length";
+import { useTranslate } from "@/lib/client/i18n/messages-context";
+import { bladeWindow } from "./blade-window";
+
+/** The tape where the answer stands: its graduation in red, and in blue where the true length falls when they differ. */
+export function ResultBlade({ answer, precision }: { answer: ConversionsAnswer | null; precision: Precision }) {
+  const t = useTranslate();
+  const metric = precision.endsWith("mm");
+  const trueInches = answer?.total.in ?? null;
+  const drawable = trueInches !== null && trueInches >= 0;
+  const marked = answer === null ? 0 : metric ? trueInches! + answer.millimetres.errorIn : trueInches! + answer.feetInches.errorIn;
+  const tape = bladeWindow(drawable ? marked : 0, precision);
+  const exact = answer?.total.lean === "exact";
+  const text = answer?.total.text ?? "";
+  const mark = tape.at(marked);
+  const description = !drawable
+    ? t(trueInches === null ? "conversions.blade.blank" : "conversions.blade.negative")
+    : t(exact ? "conversions.blade.exact" : "conversions.blade.leaning", { length: text });
+  return (
+    <figure className="result-blade">
+      <svg role="img" aria-label={description}>
+        <rect x={`${tape.hook ?? 0}%`} y="34" width="100%" height="112" fill="var(--blade)" />
+        <line x1={`${tape.hook ?? 0}%`} x2="100%" y1="34" y2="34" stroke="var(--edge-strong)" strokeWidth="1.5" />
+        <line x1={`${tape.hook ?? 0}%`} x2="100%" y1="146" y2="146" stroke="var(--edge-strong)" strokeWidth="1.5" />
+        {tape.hook === null ? null : (
+          <svg x={`${tape.hook}%`} overflow="visible">
+            <path d="M-7 26h7v130h-7z" fill="var(--steel)" />
+          </svg>
+        )}
+        {tape.ticks.map(({ key, x, height }) => (
+          <line key={key} x1={`${x}%`} x2={`${x}%`} y1="34" y2={34 + height} stroke="var(--ink)" strokeWidth={height > 70 ? 2.2 : 1.4} />
+        ))}
+        {tape.labels.map(({ key, x, count }) => (
+          <svg key={key} x={`${x}%`} overflow="visible">
+            <text x="7" y="112" className="blade-figure">
+              {metric ? count * 10 : count}
+            </text>
+            {metric || count < 12 ? null : (
+              <text x="7" y="133" className="blade-feet">
+                {`${Math.floor(count / 12)}' ${count % 12}"`}
+              </text>
+            )}
+          </svg>
+        ))}
+        {drawable && answer !== null ? (
+          <>
+            {exact ? null : <line x1={`${tape.at(trueInches)}%`} x2={`${tape.at(trueInches)}%`} y1="34" y2="146" stroke="var(--chalk-line)" strokeWidth="2.5" strokeDasharray="7 4" />}
+            <line x1={`${mark}%`} x2={`${mark}%`} y1="28" y2="152" stroke="var(--keel)" strokeWidth="3.5" />
+            <svg x={`${mark}%`} overflow="visible">
+              <path d="M0 152l-8 13h16z" fill="var(--keel)" />
+              <text y="21" x={mark > 72 ? 8 : mark < 28 ? -8 : 0} textAnchor={mark > 72 ? "end" : mark < 28 ? "start" : "middle"} className="blade-reading">
+                {text}
+              </text>
+            </svg>
+          </>
+        ) : null}
+      </svg>
+      <figcaption className="plan-caption">{description}</figcaption>
+    </figure>
+  );
+}
