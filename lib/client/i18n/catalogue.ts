@@ -3,26 +3,30 @@ import enCautions from "../messages/en/cautions.json";
 import enCommon from "../messages/en/common.json";
 import enConversions from "../messages/en/conversions.json";
 import enCorner from "../messages/en/corner.json";
+import enDevelopers from "../messages/en/developers.json";
 import enErrors from "../messages/en/errors.json";
 import enFailure from "../messages/en/failure.json";
 import enHome from "../messages/en/home.json";
 import enInset from "../messages/en/inset.json";
 import enLegal from "../messages/en/legal.json";
+import enLinks from "../messages/en/links.json";
 import enSquareness from "../messages/en/squareness.json";
 import esAnchors from "../messages/es/anchors.json";
 import esCautions from "../messages/es/cautions.json";
 import esCommon from "../messages/es/common.json";
 import esConversions from "../messages/es/conversions.json";
 import esCorner from "../messages/es/corner.json";
+import esDevelopers from "../messages/es/developers.json";
 import esErrors from "../messages/es/errors.json";
 import esFailure from "../messages/es/failure.json";
 import esHome from "../messages/es/home.json";
 import esInset from "../messages/es/inset.json";
 import esLegal from "../messages/es/legal.json";
+import esLinks from "../messages/es/links.json";
 import esSquareness from "../messages/es/squareness.json";
 import type { Locale } from "./locales";
 
-export const namespaces = ["common", "cautions", "errors", "failure", "home", "legal", "squareness", "corner", "inset", "anchors", "conversions"] as const;
+export const namespaces = ["common", "cautions", "errors", "failure", "home", "legal", "developers", "links", "squareness", "corner", "inset", "anchors", "conversions"] as const;
 export type Namespace = (typeof namespaces)[number];
 
 /** A namespace's messages as written: sentences in ICU MessageFormat under nested keys. */
@@ -37,6 +41,8 @@ export const catalogue: Readonly<Record<Locale, Readonly<Record<Namespace, Messa
     failure: enFailure,
     home: enHome,
     legal: enLegal,
+    developers: enDevelopers,
+    links: enLinks,
     squareness: enSquareness,
     corner: enCorner,
     inset: enInset,
@@ -50,6 +56,8 @@ export const catalogue: Readonly<Record<Locale, Readonly<Record<Namespace, Messa
     failure: esFailure,
     home: esHome,
     legal: esLegal,
+    developers: esDevelopers,
+    links: esLinks,
     squareness: esSquareness,
     corner: esCorner,
     inset: esInset,
