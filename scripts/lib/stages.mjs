@@ -9,7 +9,13 @@ import { placeSite, startSite } from "./standalone.mjs";
 const MINUTE = 60_000;
 const bin = (...parts) => path.join(root, "node_modules", ...parts);
 const node = (file, args, { environment = {}, minutes = 10, show = false } = {}) =>
-  run(process.execPath, [file, ...args], { cwd: root, show, env: { ...process.env, FORCE_COLOR: "0", ...environment }, signal: AbortSignal.timeout(minutes * MINUTE) });
+  run(process.execPath, [file, ...args], { cwd: root, show, env: { ...withoutColour(), ...environment }, signal: AbortSignal.timeout(minutes * MINUTE) });
+
+/** Logs are read in files as often as on screens. Vitest takes any FORCE_COLOR, even 0, for a wish. */
+function withoutColour() {
+  const { FORCE_COLOR: _, ...rest } = process.env;
+  return { ...rest, NO_COLOR: "1", VITE_CONFIG_NATIVE_IGNORE_WARNING: "true" };
+}
 
 const oneTest = ({ code, output }) => {
   if (code !== 0) console.log(output.trimEnd());
@@ -30,7 +36,7 @@ export async function types() {
 export async function vitest(project, { folder, environment, filters = [], minutes = 15 }) {
   const report = path.join(folder.dataDir, `${project}.json`);
   const { code } = await node(bin("vitest", "vitest.mjs"), [
-    "run", "--project", project, "--passWithNoTests", "--reporter=dot", "--reporter=json", `--outputFile.json=${report}`, ...filters,
+    "run", "--project", project, "--passWithNoTests", "--reporter=default", "--reporter=json", `--outputFile.json=${report}`, ...filters,
   ], { environment: { ...environment, NODE_ENV: "test" }, minutes, show: true });
   return vitestCounts(report, code);
 }
@@ -63,7 +69,7 @@ export async function siteForTests({ folder, environment, keep }) {
 export async function e2e({ folder, environment, keep, filters = [] }) {
   const site = await siteForTests({ folder, environment, keep });
   const report = path.join(folder.dataDir, "e2e.json");
-  const { code } = await node(bin("@playwright", "test", "cli.js"), ["test", "--pass-with-no-tests", "--reporter=line,json", ...filters], {
+  const { code } = await node(bin("@playwright", "test", "cli.js"), ["test", "--pass-with-no-tests", process.env.CI ? "--reporter=dot,json" : "--reporter=line,json", ...filters], {
     environment: { ...environment, E2E_BASE_URL: site.address, PLAYWRIGHT_JSON_OUTPUT_NAME: report, PLAYWRIGHT_SKIP_BROWSER_DOWNLOAD: "1" },
     minutes: 20,
     show: true,
