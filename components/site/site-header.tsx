@@ -1,6 +1,7 @@
 import { localePath } from "@/lib/client/i18n/locales";
 import type { Translate } from "@/lib/client/i18n/translate";
 import { LanguageSwitch } from "./language-switch";
+import { Menu } from "./menu";
 import { SiteLinks } from "./site-links";
 import { ThemeSwitch } from "./theme-switch";
 import { UnitSwitch } from "./unit-switch";
@@ -28,20 +29,23 @@ export function SiteHeader({ t }: { t: Translate }) {
           <UnitSwitch />
           <div className="site-wide site-wide-tools">
             <LanguageSwitch />
-            <details className="site-pop">
-              <summary>{t("common.theme.label")}</summary>
+            <Menu className="site-pop" summary={t("common.theme.label")}>
               <div className="site-pop-body">
                 <ThemeSwitch name="theme-wide" />
               </div>
-            </details>
+            </Menu>
           </div>
-          <details className="site-menu">
-            <summary>
-              <svg width="22" height="22" viewBox="0 0 22 22" aria-hidden="true" focusable="false">
-                <path d="M1 4h20M1 11h20M1 18h20" stroke="currentColor" strokeWidth="2.6" />
-              </svg>
-              <span className="sr-only">{t("common.nav.menu")}</span>
-            </summary>
+          <Menu
+            className="site-menu"
+            summary={
+              <>
+                <svg width="22" height="22" viewBox="0 0 22 22" aria-hidden="true" focusable="false">
+                  <path d="M1 4h20M1 11h20M1 18h20" stroke="currentColor" strokeWidth="2.6" />
+                </svg>
+                <span className="sr-only">{t("common.nav.menu")}</span>
+              </>
+            }
+          >
             <div className="site-menu-body">
               <SiteLinks />
               <div className="site-menu-row">
@@ -52,7 +56,7 @@ export function SiteHeader({ t }: { t: Translate }) {
                 <ThemeSwitch name="theme-narrow" />
               </div>
             </div>
-          </details>
+          </Menu>
         </div>
       </div>
     </header>

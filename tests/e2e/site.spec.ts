@@ -118,6 +118,37 @@ test("without a choice the page follows the device", async ({ page }) => {
   expect(await page.evaluate(() => getComputedStyle(document.body).backgroundColor)).toBe("rgb(17, 24, 31)"); // --page of the dark theme
 });
 
+test("paper is black on white whatever the screen shows", async ({ page }) => {
+  for (const colorScheme of ["light", "dark"] as const) {
+    await page.emulateMedia({ media: "print", colorScheme });
+    await page.goto("/terms");
+    expect(await page.evaluate(() => [getComputedStyle(document.body).color, getComputedStyle(document.body).backgroundColor])).toEqual(["rgb(0, 0, 0)", "rgb(255, 255, 255)"]);
+    await expect(page.getByRole("banner")).toBeHidden();
+  }
+});
+
+test("whoever asks the device for more contrast gets no grey text", async ({ page }) => {
+  for (const colorScheme of ["light", "dark"] as const) {
+    await page.emulateMedia({ contrast: "more", colorScheme });
+    await page.goto("/terms");
+    const [body, lead] = await page.evaluate(() => [getComputedStyle(document.body).color, getComputedStyle(document.querySelector(".lead")!).color]);
+    expect(lead).toBe(body);
+  }
+});
+
+test("an open menu closes on Escape and gives the focus back, and on a tap elsewhere @phone-only", async ({ page }) => {
+  await page.goto("/");
+  const menu = page.locator(".site-menu");
+  await menu.locator("> summary").click();
+  await page.keyboard.press("Tab");
+  await page.keyboard.press("Escape");
+  await expect(menu).not.toHaveAttribute("open");
+  await expect(menu.locator("> summary")).toBeFocused();
+  await menu.locator("> summary").click();
+  await page.locator("footer").click({ position: { x: 5, y: 5 } });
+  await expect(menu).not.toHaveAttribute("open");
+});
+
 test("the units of the device are kept @phone", async ({ page }) => {
   await page.goto("/");
   await page.getByRole("radio", { name: "mm, millimeters" }).check({ force: true });
