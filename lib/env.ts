@@ -84,6 +84,11 @@ export const variables = {
     shown: "a free one",
     meaning: "port of the local MariaDB on 127.0.0.1",
   },
+  BENCH: {
+    schema: z.preprocess(unset, z.enum(["1"]).optional()),
+    shown: "unset",
+    meaning: "1 opens `POST /api/health/echo`, the route that `npm run bench` measures the API against; never set it on a public site",
+  },
   PROVE: {
     schema: text,
     shown: "unset",
@@ -101,6 +106,7 @@ const environment = z.object({
   ANONYMOUS_PER_MINUTE: variables.ANONYMOUS_PER_MINUTE.schema,
   LINKS_PER_MINUTE: variables.LINKS_PER_MINUTE.schema,
   LOG_LEVEL: variables.LOG_LEVEL.schema,
+  BENCH: variables.BENCH.schema,
 });
 export type Environment = z.output<typeof environment>;
 

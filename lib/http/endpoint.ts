@@ -1,6 +1,7 @@
 import "server-only";
 import { randomUUID } from "node:crypto";
 import type { z } from "zod";
+import type { ProblemCode } from "@/api-spec";
 import type { Quota } from "@/lib/services/limiter";
 import { mostAtOnce } from "@/lib/services/limiter";
 import { authenticate, type Access, type Caller } from "./caller";
@@ -30,6 +31,8 @@ interface Route<Body extends z.ZodType | undefined, Params, Answer> {
   /** Whether pages of other sites may ask. */
   open?: boolean;
   status?: number;
+  /** What its handler may throw beyond what reading and charging can. */
+  problems?: readonly ProblemCode[];
   /** Headers of a good answer. */
   headers?: (answer: Answer) => Record<string, string>;
   handle(asked: Asked<Body extends z.ZodType ? z.output<Body> : undefined, Params>): Answer | Promise<Answer>;
@@ -43,6 +46,10 @@ interface RouteContext<Params> {
 export interface Endpoint<Params = unknown> {
   (request: Request, context: RouteContext<Params>): Promise<Response>;
   readonly open: boolean;
+  /** Status of a good answer, and every problem it may answer instead: the OpenAPI document is made from these. */
+  readonly status: number;
+  readonly problems: readonly ProblemCode[];
+  readonly quota: Quota | "none";
 }
 
 const json = "application/json; charset=utf-8";
@@ -86,7 +93,13 @@ export function endpoint<Params = unknown, Answer = unknown, Body extends z.ZodT
       return problemResponse(error, request, headers);
     }
   }
-  return Object.assign(respond, { open });
+  const problems: ProblemCode[] = [
+    ...(schema === undefined ? [] : (["malformed-json", "body-too-large", "unsupported-media-type", "invalid-fields"] as const)),
+    ...(quota === "none" ? [] : (["quota-spent"] as const)),
+    ...(route.problems ?? []),
+    "internal",
+  ];
+  return Object.assign(respond, { open, status, quota, problems });
 }
 
 /** More than the bucket ever holds would be told to come back again and again. */
