@@ -57,5 +57,5 @@ export const conversions: Calculator = {
     { title: "Glencoe, Carpentry & Building Construction", clause: "math activity 9, decimal feet", status: "read", address: "https://glencoe.mheducation.com/sites/0078797845" },
     { title: "NAVEDTRA 14044, Builder 3 & 2", clause: "lengths per foot of run", status: "read", address: "https://constructionmanuals.tpub.com/14044/css/" },
   ],
-  cautions: ["recheck-before-cutting"],
+  cautions: [], // nothing is built from a converted length that another calculator does not caution about
 };

@@ -30,7 +30,10 @@ export function echoOf(core: LengthCore, text: string, unit: LengthUnit, precisi
       const metres = length.in("m");
       return { kind: "plain", text: unit === "m" && read.bare ? `${length.in("mm").toString()} mm` : `${metres.toString()} m` };
     }
-    if (footMark.test(text) && !metricText) return { kind: "inches", text: core.printExact(length, "inches").replace(/"$/, "") };
+    if (footMark.test(text) && !metricText) {
+      const inches = isTapeFraction(length.inches.d) ? core.printExact(length, "inches") : core.printLength(length, precision, "inches");
+      return { kind: "inches", text: inches.replace(/"$/, "") };
+    }
     return { kind: "plain", text: print(length) };
   } catch (error) {
     if (error instanceof core.LengthError) return null;

@@ -98,7 +98,7 @@ export function ConversionsCalculator({ header, initial }: { header: ReactNode; 
       name="conversions"
       operation="conversions"
       header={header}
-      drawing={<ResultBlade answer={answer} precision={precision} />}
+      drawing={<ResultBlade answer={answer} precision={precision} single={rows === 0} />}
       fields={fields}
       verdict={answer === null ? <Verdict tone="idle" title={t("conversions.verdict.waiting")} /> : <TotalVerdict answer={answer} metric={metric} />}
       results={

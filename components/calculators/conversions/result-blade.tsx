@@ -5,8 +5,11 @@ import type { Precision } from "@/calculators/length";
 import { useTranslate } from "@/lib/client/i18n/messages-context";
 import { bladeWindow } from "./blade-window";
 
+/** How much of the width a figure may take on a phone, in per cent: nearer than this, the mark would stand on it. */
+const labelRoom = 17;
+
 /** The tape where the answer stands: its graduation in red, and in blue where the true length falls when they differ. */
-export function ResultBlade({ answer, precision }: { answer: ConversionsAnswer | null; precision: Precision }) {
+export function ResultBlade({ answer, precision, single }: { answer: ConversionsAnswer | null; precision: Precision; single: boolean }) {
   const t = useTranslate();
   const metric = precision.endsWith("mm");
   const trueInches = answer?.total.in ?? null;
@@ -20,7 +23,7 @@ export function ResultBlade({ answer, precision }: { answer: ConversionsAnswer |
     ? t(trueInches === null ? "conversions.blade.blank" : "conversions.blade.negative")
     : t(exact ? "conversions.blade.exact" : "conversions.blade.leaning", { length: text });
   return (
-    <figure className="result-blade">
+    <figure className="result-blade" data-single={single || undefined}>
       <svg role="img" aria-label={description}>
         <rect x={`${tape.hook ?? 0}%`} y="34" width="100%" height="112" fill="var(--blade)" />
         <line x1={`${tape.hook ?? 0}%`} x2="100%" y1="34" y2="34" stroke="var(--edge-strong)" strokeWidth="1.5" />
@@ -33,18 +36,22 @@ export function ResultBlade({ answer, precision }: { answer: ConversionsAnswer |
         {tape.ticks.map(({ key, x, height }) => (
           <line key={key} x1={`${x}%`} x2={`${x}%`} y1="34" y2={34 + height} stroke="var(--ink)" strokeWidth={height > 70 ? 2.2 : 1.4} />
         ))}
-        {tape.labels.map(({ key, x, count }) => (
-          <svg key={key} x={`${x}%`} overflow="visible">
-            <text x="7" y="112" className="blade-figure">
-              {metric ? count * 10 : count}
-            </text>
-            {metric || count < 12 ? null : (
-              <text x="7" y="133" className="blade-feet">
-                {`${Math.floor(count / 12)}' ${count % 12}"`}
+        {tape.labels.map(({ key, x, count }) => {
+          const aside = x > labelRoom && (x > 100 - labelRoom || (drawable && mark > x && mark < x + labelRoom));
+          const place = { x: aside ? -7 : 7, textAnchor: aside ? "end" : "start" } as const;
+          return (
+            <svg key={key} x={`${x}%`} overflow="visible">
+              <text {...place} y="112" className="blade-figure">
+                {metric ? count * 10 : count}
               </text>
-            )}
-          </svg>
-        ))}
+              {metric || count < 12 ? null : (
+                <text {...place} y="133" className="blade-feet">
+                  {`${Math.floor(count / 12)}' ${count % 12}"`}
+                </text>
+              )}
+            </svg>
+          );
+        })}
         {drawable && answer !== null ? (
           <>
             {exact ? null : <line x1={`${tape.at(trueInches)}%`} x2={`${tape.at(trueInches)}%`} y1="34" y2="146" stroke="var(--chalk-line)" strokeWidth="2.5" strokeDasharray="7 4" />}

@@ -63,7 +63,11 @@ export function StripLine({ form, row, total, onRemove }: StripLineProps) {
       )}
       {row === 0 ? null : (
         <p className="strip-total">
-          <span className="strip-total-word">{t("conversions.strip.total")}</span> {total === undefined ? null : <LengthText text={total.text} />}
+          {total === undefined ? null : (
+            <>
+              <span className="strip-total-word">{t("conversions.strip.total")}</span> <LengthText text={total.text} />
+            </>
+          )}
         </p>
       )}
     </li>
