@@ -29,7 +29,7 @@ export default defineConfig({
           hookTimeout: 60_000,
         },
       },
-      { ...shared, test: { name: "start", include: ["tests/start/**/*.test.ts"], fileParallelism: false, testTimeout: minutes(5), hookTimeout: minutes(2) } },
+      { ...shared, test: { name: "start", include: ["tests/start/**/*.test.ts"], fileParallelism: false, testTimeout: minutes(process.env.PROVE ? 20 : 5), hookTimeout: minutes(2) } },
     ],
   },
 });

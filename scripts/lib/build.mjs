@@ -8,13 +8,17 @@ import { own } from "./processes.mjs";
 import { run } from "./run.mjs";
 
 /** All that a build is made from; a change to anything else leaves it fresh. */
-const SOURCES = [
+export const SOURCES = [
   "api-spec", "app", "calculators", "components", "lib", "models", "public", "package-lock.json", "next.config.mjs", "tsconfig.json",
   "tailwind.config.ts", "postcss.config.mjs", "proxy.ts", "instrumentation.ts", "scripts/lib/build.mjs", "scripts/lib/csp.mjs",
 ];
 const stampFile = (root) => path.join(root, ".next", "sillwright-build.json");
 
-/** A hash over every source and over what else goes into the pages. */
+/**
+ * A hash over every source and over what else goes into the pages.
+ * @param {string} root
+ * @param {Record<string, string | undefined>} environment
+ */
 export function sourceHash(root, environment = process.env) {
   const hash = createHash("sha256");
   hash.update(`node ${process.versions.node.split(".")[0]}\0${environment.SITE_URL ?? ""}\0`);

@@ -33,7 +33,7 @@ export async function types() {
 }
 
 /** Runs one of vitest.config.ts's projects. */
-export async function vitest(project, { folder, environment, filters = [], minutes = 15 }) {
+export async function vitest(project, { folder, environment, filters = [], minutes = environment.PROVE ? 120 : 15 }) {
   const report = path.join(folder.dataDir, `${project}.json`);
   const { code } = await node(bin("vitest", "vitest.mjs"), [
     "run", "--project", project, "--passWithNoTests", "--reporter=default", "--reporter=json", `--outputFile.json=${report}`, ...filters,
