@@ -1,3 +1,4 @@
+import { anchors } from "./anchors";
 import { conversions } from "./conversions";
 import { inset } from "./inset";
 import type { Calculator, Operation } from "./schema";
@@ -5,6 +6,7 @@ import type { Calculator, Operation } from "./schema";
 /** Every calculator, in the order of the job. Pages, API, OpenAPI, short links and tests read this list. */
 export const calculators: readonly Calculator[] = [
   inset,
+  anchors,
   conversions,
 ];
 

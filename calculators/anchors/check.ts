@@ -6,7 +6,7 @@ import type { CheckAnswer, CheckInput } from "./check-input";
 import { untestedCodes } from "./check-input";
 import { neededProjection } from "./hardware";
 import { judgeWall, type Violation, type Wall } from "./judge";
-import { crowded, diameterOf, evenMark, limitsOf, shortWallException } from "./limits";
+import { crowded, diameterOf, evenMark, limitsOf, refuseTooMany, shortWallException } from "./limits";
 import { memberCentres, memberReach } from "./members";
 import { answerAboutRule } from "./shared-answer";
 import { boltsInOrder, insetsAt, piecesInOrder, type Bolt } from "./survey";
@@ -19,7 +19,7 @@ import { boltWarnings } from "./bolt-warnings";
  * the finding. The centre is tested against the middle third; a shank that leaves it is a warning. Engineered bolts are
  * neither judged nor counted nor moved. Bolts and pieces may come in any order; a bolt entered twice counts once.
  *
- * @throws CalculationError `piece-backwards`, `pieces-overlap`, `inset-needed`.
+ * @throws CalculationError `piece-backwards`, `pieces-overlap`, `inset-needed`, `too-many-bolts`.
  * @example A 16 ft piece with bolts at 8 in, 80 in and 184 in fails us-irc in spacing alone: 104 in where 72 are allowed.
  */
 export function checkBolts(input: CheckInput): CheckAnswer {
@@ -28,6 +28,7 @@ export function checkBolts(input: CheckInput): CheckAnswer {
   const limits = limitsOf(rule, diameter);
   const pieces = piecesInOrder(input);
   const all = boltsInOrder(input, diameter);
+  refuseTooMany(limits, pieces.map(({ from, to }) => to.minus(from)));
   const [start, end] = [pieces[0]!.from, pieces.at(-1)!.to];
   const exception = shortWallException(rule, end.minus(start), input.joinsOffsetPanels);
   const wall: Wall = {

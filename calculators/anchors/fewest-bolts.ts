@@ -27,7 +27,8 @@ export interface Placement {
   unmet: (Need | { after: number })[];
 }
 
-type Gap = { deadline: number; low: number; after: number } | { deadline: number; low: number; need: Need };
+/** A place for one more bolt: no further along than `deadline`, not before `low`. `ahead`: for the sake of a need still further along. */
+type Gap = { deadline: number; low: number; after: number; ahead: boolean } | { deadline: number; low: number; need: Need };
 
 /**
  * The fewest bolts to add so that every need and the spacing are met.
@@ -48,27 +49,43 @@ export function fewestBolts(demand: Demand): Placement {
       added.push(place);
     } else {
       given.add(keyOf(gap));
-      unmet.push("need" in gap ? gap.need : { after: gap.after });
+      if ("need" in gap) unmet.push(gap.need);
+      else if (!gap.ahead) unmet.push({ after: gap.after });
     }
   }
   return { added: added.sort((a, b) => a - b), unmet };
 }
 
-const keyOf = (gap: Gap) => ("need" in gap ? `need ${gap.need.low} ${gap.need.high}` : `gap ${gap.after}`);
+const keyOf = (gap: Gap) => ("need" in gap ? `need ${gap.need.low} ${gap.need.high}` : `${gap.ahead ? "ahead" : "gap"} ${gap.after}`);
 
-function firstGap({ standing, spacing, runs, needs, apart }: Demand, added: readonly number[], given: ReadonlySet<string>): Gap | null {
+function firstGap(demand: Demand, added: readonly number[], given: ReadonlySet<string>): Gap | null {
+  const { standing, spacing, runs, needs, apart } = demand;
   const all = [...standing, ...added].sort((a, b) => a - b);
+  const afterBolt = (bolt: number) => bolt + (added.includes(bolt) ? apart : 1);
   let first: Gap | null = null;
   const offer = (gap: Gap) => {
     if ((first === null || gap.deadline < first.deadline) && !given.has(keyOf(gap))) first = gap;
   };
-  for (const need of needs) if (countWithin(all, need.low, need.high) < need.count) offer({ deadline: need.high, low: need.low, need });
+  for (const need of needs) {
+    if (countWithin(all, need.low, need.high) >= need.count) continue;
+    const run = runs.find(([start, end]) => need.high >= start && need.high <= end);
+    const last = run === undefined ? undefined : all.findLast((bolt) => bolt >= run[0] && bolt <= run[1]);
+    if (spacing === null || last === undefined || last + spacing >= need.high) {
+      offer({ deadline: need.high, low: need.low, need });
+      continue;
+    }
+    // A bolt further along than one spacing from the last needs another between: that one comes first.
+    const step: Gap = { deadline: last + spacing, low: afterBolt(last), after: last, ahead: true };
+    const back = lastFree(demand, added, last);
+    if (!given.has(keyOf(step))) offer(step);
+    else offer({ deadline: back !== null && back >= need.low ? last : need.high, low: need.low, need });
+  }
   if (spacing === null) return first;
   for (const [start, end] of runs) {
-    const inRun = all.filter((bolt) => bolt >= start && bolt <= end);
-    for (let index = 1; index < inRun.length; index += 1) {
-      const before = inRun[index - 1]!;
-      if (inRun[index]! - before > spacing) offer({ deadline: before + spacing, low: before + Math.max(1, added.includes(before) ? apart : 1), after: before });
+    const past = firstFrom(all, end + 1);
+    for (let index = firstFrom(all, start) + 1; index < past; index += 1) {
+      const before = all[index - 1]!;
+      if (all[index]! - before > spacing) offer({ deadline: before + spacing, low: afterBolt(before), after: before, ahead: false });
     }
   }
   return first;
@@ -86,8 +103,19 @@ function lastFree({ allowed, apart }: Demand, added: readonly number[], deadline
   return place;
 }
 
+/** How many of the bolts in order stand in [low, high]. */
 function countWithin(bolts: readonly number[], low: number, high: number): number {
-  return bolts.reduce((count, bolt) => count + (bolt >= low && bolt <= high ? 1 : 0), 0);
+  return Math.max(0, firstFrom(bolts, high + 1) - firstFrom(bolts, low));
+}
+
+function firstFrom(bolts: readonly number[], place: number): number {
+  let [low, high] = [0, bolts.length];
+  while (low < high) {
+    const middle = (low + high) >> 1;
+    if (bolts[middle]! < place) low = middle + 1;
+    else high = middle;
+  }
+  return low;
 }
 
 /** Whether these bolts meet every need and the spacing. */

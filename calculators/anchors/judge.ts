@@ -2,6 +2,7 @@ import type { Length } from "../length";
 import { isThickEnough, spacingFor, type FigureStatus, type Rule } from "../rules";
 import type { FindingCode, Remedy } from "./check-input";
 import type { Limits } from "./limits";
+import { nearestMember } from "./members";
 import { pieceOf, runsOf, type Bolt, type Piece } from "./survey";
 
 /** One violation, still exact. */
@@ -137,10 +138,7 @@ function judgeBolt(wall: Wall, bolt: Bolt, piece: Piece): Violation[] {
     if (cover.compare(rule.edgeCover.value) < 0) found.push(violation("slab-edge", "ask-engineer", { piece, bolt, ...from(rule.edgeCover), limit: rule.edgeCover.value, actual: cover }));
   }
   const reach = wall.reach(bolt.diameter);
-  const nearest = centres.reduce<Length | null>((least, centre) => {
-    const distance = centre.minus(bolt.station).magnitude();
-    return least === null || distance.compare(least) < 0 ? distance : least;
-  }, null);
+  const nearest = nearestMember(centres, bolt.station);
   if (nearest !== null && nearest.compare(reach) < 0) found.push(violation("under-joist", "move-joist", { piece, bolt, limit: reach, actual: nearest, status: "practice" }));
   const needed = wall.neededProjection(bolt.diameter);
   if (bolt.projection !== null && bolt.projection.compare(needed) < 0) found.push(violation("too-short", "extend-bolt", { piece, bolt, limit: needed, actual: bolt.projection, status: "practice" }));

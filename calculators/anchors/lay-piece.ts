@@ -13,7 +13,7 @@ interface PieceTask {
   exception: Rule["shortWalls"][number] | null;
   centres: readonly Length[];
   reach: Length;
-  module: { step: Length; start: Length } | null;
+  grid: { step: Length; start: Length } | null;
   isFirst: boolean;
   isLast: boolean;
   /** Bolts moved off their even places stand on whole marks of this. */
@@ -69,17 +69,18 @@ function evenStations({ from, to, limits, ends, exception }: PieceTask, single: 
 }
 
 function place(task: PieceTask, even: readonly Length[]): LaidPiece | null {
-  const { from, to, limits, exception, centres, reach, module } = task;
+  const { from, to, limits, exception, reach, grid } = task;
+  const centres = task.centres.filter((centre) => centre.plus(reach).compare(from) > 0 && centre.minus(reach).compare(to) < 0);
   const third = to.minus(from).over(3);
   const edge = exception === null ? (limits.endMinimum ?? Length.zero) : third;
-  const known = [from, to, edge, reach, limits.spacing, limits.endMaximum, limits.wallEndMaximum, third, limits.diameter, ...even, ...centres, module?.step, module?.start, task.mark];
+  const known = [from, to, edge, reach, limits.spacing, limits.endMaximum, limits.wallEndMaximum, third, limits.diameter, ...even, ...centres, grid?.step, grid?.start, task.mark];
   const ticks = new Ticks(known.filter((length): length is Length => length instanceof Length));
   const [low, high] = [ticks.ceil(from.plus(edge)), ticks.floor(to.minus(edge))];
   if (low > high) return null;
   let allowed: Span[] = [[low, high]];
   for (const centre of centres) allowed = without(allowed, ticks.floor(centre), ticks.ceil(reach));
-  if (module !== null) allowed = marksWithin(allowed, ticks.floor(module.start), Math.max(1, ticks.floor(module.step)));
-  if (module === null && even.every((station) => contains(allowed, ticks.floor(station)))) return laidPiece(task, even, true);
+  if (grid !== null) allowed = marksWithin(allowed, ticks.floor(grid.start), Math.max(1, ticks.floor(grid.step)));
+  if (grid === null && even.every((station) => contains(allowed, ticks.floor(station)))) return laidPiece(task, even, true);
 
   const demand = demandOf(task, allowed, ticks, even.length);
   const placement = fewestBolts(demand);
@@ -96,7 +97,8 @@ function demandOf({ from, to, limits, exception, isFirst, isLast }: PieceTask, a
   const [start, end] = [ticks.ceil(from), ticks.floor(to)];
   const everywhere = { low: start, high: end, count: exception?.bolts ?? limits.boltsPerPiece ?? Math.min(2, evenCount) };
   const spacing = limits.spacing === null || exception !== null ? null : ticks.floor(limits.spacing);
-  const reachOf = (isEnd: boolean) => (isEnd ? limits.wallEndMaximum : limits.endMaximum) ?? limits.spacing;
+  // Where the rule is silent, half the spacing on each side of a joint keeps it across the joint.
+  const reachOf = (isEnd: boolean) => (isEnd ? (limits.wallEndMaximum ?? limits.spacing) : (limits.endMaximum ?? limits.spacing?.over(2) ?? null));
   const firstReach = reachOf(isFirst);
   const lastReach = reachOf(isLast);
   const needs = [everywhere];

@@ -1,10 +1,10 @@
 import { z } from "zod";
-import { Length, type Precision } from "../length";
+import { Length } from "../length";
 import { isThickEnough, ruleOf, type Rule } from "../rules";
 import { CalculationError, calculatorInput, lengthAnswer, measure, type Issue } from "../schema";
 import { layoutFields } from "./fields";
 import { bitAnswer, holeFault } from "./hardware";
-import { crowded, diameterOf, endDistanceWithin, evenMark, limitsOf, shortWallException, type Limits } from "./limits";
+import { crowded, diameterOf, endDistanceWithin, evenMark, limitsOf, refuseTooMany, shortWallException, type Limits } from "./limits";
 import { layPiece, type LaidPiece } from "./lay-piece";
 import { memberCentres, memberReach } from "./members";
 import { answerAboutRule, sharedAnswer } from "./shared-answer";
@@ -42,7 +42,7 @@ export type LayoutAnswer = z.output<typeof layoutAnswer>;
  * (l − 2e)/(n − 1) apart, n the least with that within the spacing, and never under the rule's number. A rule that states
  * no number or no end distance leaves both to the layout: two bolts, `endDistance` from the ends.
  *
- * @throws CalculationError `end-distance-outside-rule`, `piece-too-short`, `no-layout`, `diameter-under-rule`.
+ * @throws CalculationError `end-distance-outside-rule`, `piece-too-short`, `no-layout`, `diameter-under-rule`, `too-many-bolts`.
  * @example 10 ft with end bolts at 12 in under us-irc takes 3 bolts, 48 in apart (domain.md B10).
  */
 export function layOutBolts(input: LayoutInput): LayoutAnswer {
@@ -54,9 +54,10 @@ export function layOutBolts(input: LayoutInput): LayoutAnswer {
   const ends = endDistanceOf(input, limits);
   refuseThinBolt(rule, limits, input.diameter);
 
+  refuseTooMany(limits, input.pieces);
   const centres = memberCentres(input.members, Length.zero, wallLength);
   const reach = memberReach(input.members, diameter);
-  const module = input.module === undefined ? null : { step: input.module, start: input.moduleStart ?? Length.zero };
+  const grid = input.module === undefined ? null : { step: input.module, start: input.moduleStart ?? Length.zero };
   const issues: Issue[] = [];
   const laid: LaidPiece[] = [];
   let from = Length.zero;
@@ -64,7 +65,7 @@ export function layOutBolts(input: LayoutInput): LayoutAnswer {
     const isFirst = index === 0;
     const isLast = index === input.pieces.length - 1;
     const to = from.plus(length);
-    const piece = layPiece({ from, to, limits, ends, exception, centres, reach, module, isFirst, isLast, mark: evenMark(input.precision) });
+    const piece = layPiece({ from, to, limits, ends, exception, centres, reach, grid, isFirst, isLast, mark: evenMark(input.precision) });
     if ("refused" in piece) issues.push({ pointer: `/pieces/${index}`, code: piece.refused, params: piece.least === null ? {} : { least: measure(piece.least, input.precision).text } });
     else laid.push(piece);
     from = to;

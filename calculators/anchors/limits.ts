@@ -1,4 +1,5 @@
 import { isMetric, Length, type Precision } from "../length";
+import { CalculationError } from "../schema";
 import { endMinimumFor, spacingFor, type Rule } from "../rules";
 
 export const halfInch = Length.from(0.5);
@@ -55,4 +56,13 @@ export function endDistanceWithin(least: Length | null, most: Length | null): Le
 /** Bolts that need not stand at an exact place stand on whole quarters of an inch, or 5 mm. */
 export function evenMark(precision: Precision): Length {
   return isMetric(precision) ? Length.from(5, "mm") : Length.from(0.25);
+}
+
+/** A wall of more bolts than this is no wall of plates, and placing them would keep a server busy. */
+export const mostBolts = 500;
+
+/** @throws CalculationError `too-many-bolts` when the rule could ask these pieces for more than `mostBolts`. */
+export function refuseTooMany({ spacing, boltsPerPiece }: Limits, lengths: readonly Length[]): void {
+  const bySpacing = spacing === null ? 0 : lengths.reduce((sum, length) => sum + length.inches.div(spacing.inches).valueOf(), 0);
+  if (bySpacing + lengths.length * (boltsPerPiece ?? 1) > mostBolts) throw new CalculationError([{ pointer: "/pieces", code: "too-many-bolts", params: { maximum: mostBolts } }]);
 }

@@ -1,4 +1,5 @@
 import { Length } from "../length";
+import { CalculationError } from "../schema";
 
 export interface Members {
   stations?: readonly Length[] | undefined;
@@ -9,16 +10,22 @@ export interface Members {
 }
 
 const defaultThickness = Length.from(1.5);
-/** A wall of 10 000 ft at any sane spacing stays below; a spacing of nothing does not run away. */
-const mostMembers = 5000;
+const mostMembers = 1000;
 
-/** Centres of the joists or studs on a wall from `start` to `end`. */
+/**
+ * Centres of the joists or studs on a wall from `start` to `end`, in order.
+ *
+ * @throws CalculationError `too-many` at `/members/spacing` past 1000 of them.
+ */
 export function memberCentres(members: Members | undefined, start: Length, end: Length): Length[] {
   if (members === undefined) return [];
   const centres = [...(members.stations ?? [])];
   if (members.spacing !== undefined) {
     const { spacing, first = members.spacing } = members;
-    for (let centre = first; centre.compare(end) <= 0 && centres.length < mostMembers; centre = centre.plus(spacing)) if (centre.compare(start) >= 0) centres.push(centre);
+    const skipped = Math.max(0, Number(start.minus(first).inches.div(spacing.inches).ceil().valueOf()));
+    const count = Number(end.minus(first).inches.div(spacing.inches).floor().valueOf()) - skipped + 1;
+    if (count > mostMembers) throw new CalculationError([{ pointer: "/members/spacing", code: "too-many", params: { maximum: mostMembers } }]);
+    for (let index = 0; index < count; index += 1) centres.push(first.plus(spacing.times(skipped + index)));
   }
   return centres.sort((a, b) => a.compare(b));
 }
@@ -27,4 +34,17 @@ export function memberCentres(members: Members | undefined, start: Length, end: 
 export function memberReach(members: Members | undefined, diameter: Length): Length {
   const thickness = members?.thickness ?? defaultThickness;
   return thickness.plus(diameter).over(2).plus(members?.clearance ?? Length.zero);
+}
+
+/** The distance from a station to the nearest of the centres in order; null without any. */
+export function nearestMember(centres: readonly Length[], station: Length): Length | null {
+  let [low, high] = [0, centres.length];
+  while (low < high) {
+    const middle = (low + high) >> 1;
+    if (centres[middle]!.compare(station) < 0) low = middle + 1;
+    else high = middle;
+  }
+  const [before, after] = [centres[low - 1], centres[low]];
+  const distances = [before, after].flatMap((centre) => (centre === undefined ? [] : [centre.minus(station).magnitude()]));
+  return distances.reduce<Length | null>((least, distance) => (least === null || distance.compare(least) < 0 ? distance : least), null);
 }
