@@ -84,7 +84,7 @@ export function LengthField({ name, id = fieldId(name), value, onChange, unit, p
           {echo === null ? null : t.rich(echoKeys[echo.kind], { length: <span className="whitespace-nowrap">{echo.text}</span> })}
         </span>
       </div>
-      <MarkKeys input={input} onChange={onChange} />
+      <MarkKeys input={input} />
       {blade ? <TapeBlade core={core} label={label} value={value} onChange={onChange} unit={unit} precision={precision} controls={id} /> : null}
     </Field>
   );

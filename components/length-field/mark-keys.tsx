@@ -12,7 +12,7 @@ const keys = [
 ] as const satisfies readonly { mark: Mark; label: string; spoken: string }[];
 
 /** The slim row of a touch screen, whose decimal keypad lacks these marks. The field keeps focus and its keypad. */
-export function MarkKeys({ input, onChange }: { input: RefObject<HTMLInputElement | null>; onChange: (value: string) => void }) {
+export function MarkKeys({ input }: { input: RefObject<HTMLInputElement | null> }) {
   const t = useTranslate();
 
   function press(mark: Mark): void {
@@ -20,9 +20,10 @@ export function MarkKeys({ input, onChange }: { input: RefObject<HTMLInputElemen
     if (field === null) return;
     const length = field.value.length;
     const typed = insertMark(field.value, field.selectionStart ?? length, field.selectionEnd ?? length, mark);
-    onChange(typed.text);
-    // The new text is in the field after React has rendered; only then can the caret go behind the mark.
-    requestAnimationFrame(() => field.setSelectionRange(typed.caret, typed.caret));
+    // Written into the field and told to React as typing is, so that text and caret change in the same moment and the next key falls right.
+    field.setRangeText(typed.text, 0, length, "end");
+    field.setSelectionRange(typed.caret, typed.caret);
+    field.dispatchEvent(new Event("input", { bubbles: true }));
   }
 
   return (
