@@ -7,11 +7,11 @@ import { image, type Zone } from "./zone";
 export type JointWindows = readonly Interval[];
 
 /** Ways beyond these are not looked at; the answer then no longer claims that no other could save a board. */
-export const mostWays = 48;
+export const mostWays = 200;
 
 /**
  * The different ways to joint a stretch at the least cost, each as its joints' windows. `complete` is false when there
- * are more than `mostWays`.
+ * are more than `mostWays`, or when joints that depend on one another had to be given narrower windows than they have together.
  *
  * Within the windows every piece keeps the rule and its least length; that it is no longer than a board is left to
  * the cutting, which knows the boards.
@@ -22,12 +22,17 @@ export function jointWindows(graph: PieceGraph, limits: PieceLimits, cost: Least
   const ways: JointWindows[] = [];
   const seen = new Set<string>();
   let complete = true;
+  let full = false;
   const walk = (place: number, from: Interval, added: number, pieces: number, zones: Zone[]): void => {
     if (place === last) {
-      const windows = independentWindows(zones, graph.stretch.from, graph.stretch.to, limits.longest);
-      if (windows === null || seen.has(windows.join())) return;
+      const found = independentWindows(zones, graph.stretch.from, graph.stretch.to, limits.longest);
+      if (found === null) return;
+      const { windows, narrowed } = found;
+      if (narrowed) complete = false;
+      if (seen.has(windows.join())) return;
       if (ways.length >= mostWays) {
         complete = false;
+        full = true;
         return;
       }
       seen.add(windows.join());
@@ -35,7 +40,7 @@ export function jointWindows(graph: PieceGraph, limits: PieceLimits, cost: Least
       return;
     }
     for (const { to, way } of graph.pieces[place]!) {
-      if (ways.length >= mostWays && !complete) return;
+      if (ways.length >= mostWays && full) return;
       for (const next of remaining(to, added - way.added, pieces - 1)) {
         const reached = image(way.ends, from);
         if (reached === null) continue;
@@ -53,7 +58,7 @@ export function jointWindows(graph: PieceGraph, limits: PieceLimits, cost: Least
  * their neighbours make them, then where two joints could come too near or stand too far apart each window gives way
  * by half. Null when the zones leave no joints at all.
  */
-function independentWindows(zones: readonly Zone[], from: number, to: number, longest: number): JointWindows | null {
+function independentWindows(zones: readonly Zone[], from: number, to: number, longest: number): { windows: JointWindows; narrowed: boolean } | null {
   const low = [from, ...zones.slice(1).map((zone, index) => Math.max(zone.a[0], zones[index]!.b[0])), to];
   const high = [from, ...zones.slice(1).map((zone, index) => Math.min(zone.a[1], zones[index]!.b[1])), to];
   const tighten = (): boolean => {
@@ -68,6 +73,7 @@ function independentWindows(zones: readonly Zone[], from: number, to: number, lo
     return low.every((value, index) => value <= high[index]!);
   };
   if (!tighten()) return null;
+  let narrowed = false;
   for (let changed = true; changed; ) {
     changed = false;
     for (let index = 0; index < zones.length; index += 1) {
@@ -86,10 +92,11 @@ function independentWindows(zones: readonly Zone[], from: number, to: number, lo
         high[index + 1]! -= second;
         changed = true;
       }
+      narrowed ||= changed;
       if (changed && !tighten()) return null;
     }
   }
-  return low.slice(1, -1).map((value, index): Interval => [value, high[index + 1]!]);
+  return { windows: low.slice(1, -1).map((value, index): Interval => [value, high[index + 1]!]), narrowed };
 }
 
 /** Splits what two windows must give up together, no window more than it has. */
