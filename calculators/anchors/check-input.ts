@@ -17,6 +17,8 @@ export const untestedCodes = ["middle-third", "slab-edge", "under-joist", "too-s
 export const checkAnswer = z
   .strictObject({
     ok: z.boolean(),
+    pieces: z.array(z.strictObject({ from: lengthAnswer, to: lengthAnswer, length: lengthAnswer, bolts: z.number().meta({ description: "Bolts that count on it" }) })),
+    bolts: z.array(z.strictObject({ station: lengthAnswer, offset: lengthAnswer.nullable(), engineered: z.boolean() })).meta({ description: "As they stand from the chalk" }),
     findings: z.array(
       z.strictObject({
         code: z.enum(findingCodes),

@@ -9,13 +9,13 @@ import { judgeWall, type Violation, type Wall } from "./judge";
 import { crowded, diameterOf, evenMark, limitsOf, refuseTooMany, shortWallException } from "./limits";
 import { memberCentres, memberReach } from "./members";
 import { answerAboutRule } from "./shared-answer";
-import { boltsInOrder, insetsAt, piecesInOrder, type Bolt } from "./survey";
+import { boltsInOrder, insetsAt, pieceOf, piecesInOrder, type Bolt } from "./survey";
 import { boltWarnings } from "./bolt-warnings";
 
 /**
  * Every bolt of a poured wall judged against a rule, and the fewest anchors to add where they fail it.
  *
- * Units: exact rational inches; a bolt on a limit meets it. Sources: the rule's figures, each with clause and status in
+ * Units: exact rational inches; a bolt on a limit meets it. Source: the rule's figures, each with clause and status in
  * the finding. The centre is tested against the middle third; a shank that leaves it is a warning. Engineered bolts are
  * neither judged nor counted nor moved. Bolts and pieces may come in any order; a bolt entered twice counts once.
  *
@@ -53,6 +53,8 @@ export function checkBolts(input: CheckInput): CheckAnswer {
 
   return {
     ok: violations.length === 0,
+    pieces: [...pieces].sort((a, b) => a.index - b.index).map((piece) => ({ from: show(piece.from), to: show(piece.to), length: show(piece.to.minus(piece.from)), bolts: wall.bolts.filter((bolt) => pieceOf(pieces, bolt) === piece).length })),
+    bolts: inRequestOrder(all).map(({ station, offset, engineered }) => ({ station: show(station), offset: offset === null ? null : show(offset), engineered })),
     findings: violations.map((violation) => findingOf(violation, show)),
     additions: fix.added.map(({ piece, station }) => ({ piece: piece.index, station: show(station), hole: show(station.minus(piece.from)), across })),
     unfixable: fix.unfixable.map(({ piece, tooShort }) => ({ piece: piece.index, code: tooShort ? "piece-too-short" : "no-room", least: tooShort && limits.endMinimum !== null ? show(limits.endMinimum.times(2).plus(crowded)) : null })),

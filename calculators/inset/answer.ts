@@ -4,7 +4,10 @@ import { sides } from "./input";
 
 const perDiagonal = <T extends z.ZodType>(item: T) => z.strictObject({ ac: item, bd: item });
 const cornerName = z.enum(["A", "B", "C", "D"]);
+const point = z.strictObject({ x: z.number(), y: z.number() });
 const cornerAnswer = z.strictObject({
+  slab: point.meta({ description: "Inches from A, x along AB" }),
+  chalk: point,
   angleDegrees: z.number().meta({ description: "Angle of the slab's corner" }),
   fromCorner: lengthAnswer.meta({ description: "From the slab's corner straight to the chalk's" }),
 });

@@ -2,7 +2,7 @@ import type Fraction from "fraction.js";
 import { graduation, Length, squareRoot } from "../length";
 import { CalculationError, measure, type Issue } from "../schema";
 import type { InsetAnswer } from "./answer";
-import { chalkCorners, cornerDistance, figureOf, slabCorners, type Slab } from "./chalk-geometry";
+import { chalkCorners, cornerDistance, figureOf, slabCorners, type Corner, type Slab } from "./chalk-geometry";
 import { sides, type Diagonal, type InsetInput, type Side } from "./input";
 import { burnOf, readingsOf, type ByDiagonal, type Group, type Readings } from "./readings";
 import { closureFactor, judgeChalk, marksFrom, type Suspect } from "./suspects";
@@ -16,7 +16,7 @@ const defaultReadingError = Length.from(0.125);
  * Units: lengths are exact rational inches; a rectangle's lines and drops come out exact where they are rational. The
  * slab is the parallelogram of its two sizes whose racking its diagonals give: cos A = (AC² − BD²) / (4·AB·DA).
  * Each chalk line runs parallel to its edge.
- * Sources: the strips' geometry (see `cornerDistance`); the closure test of `judgeChalk`.
+ * Source: the strips' geometry (see `cornerDistance`), and the closure test of `judgeChalk`.
  *
  * @throws CalculationError `inset-too-big`, `burn-over-reading`, `diagonal-impossible`.
  * @example 28 by 40 ft inset 1/2 in all round: 27' 11" by 39' 11", diagonal 48' 8 1/2" (domain.md N01).
@@ -113,9 +113,17 @@ function lineBoundOf(slab: Slab, { ab, bc, cd, da }: Insets): number {
 }
 
 function cornersOf(slab: Slab, insets: Insets, show: (value: number) => InsetAnswer["drop"]): InsetAnswer["corners"] {
-  const { ab, bc, cd, da } = inNumbers(insets);
-  const at = (first: number, second: number, cosine: number) => ({ angleDegrees: (Math.acos(cosine) * 180) / Math.PI, fromCorner: show(cornerDistance(first, second, cosine)) });
-  return { A: at(da, ab, slab.cosine), B: at(ab, bc, -slab.cosine), C: at(bc, cd, slab.cosine), D: at(cd, da, -slab.cosine) };
+  const numbers = inNumbers(insets);
+  const { ab, bc, cd, da } = numbers;
+  const onSlab = slabCorners(slab);
+  const onChalk = chalkCorners(slab, marksFrom(numbers));
+  const at = (name: Corner, first: number, second: number, cosine: number) => ({
+    slab: onSlab[name],
+    chalk: onChalk[name],
+    angleDegrees: (Math.acos(cosine) * 180) / Math.PI,
+    fromCorner: show(cornerDistance(first, second, cosine)),
+  });
+  return { A: at("A", da, ab, slab.cosine), B: at("B", ab, bc, -slab.cosine), C: at("C", bc, cd, slab.cosine), D: at("D", cd, da, -slab.cosine) };
 }
 
 function checkOf(input: InsetInput, slab: Slab, insets: Insets, readings: Readings, drops: ByDiagonal<Length | number>): { check: InsetAnswer["check"]; suspects: Suspect[] } {
