@@ -73,7 +73,7 @@ export async function build(root, { force = false, show = false } = {}) {
     const next = path.join(root, "node_modules", "next", "dist", "bin", "next");
     const { code, output } = await run(process.execPath, [next, "build"], {
       cwd: root,
-      env: { ...process.env, NODE_ENV: "production", NEXT_TELEMETRY_DISABLED: "1" },
+      env: { ...process.env, NODE_ENV: "production", NEXT_TELEMETRY_DISABLED: "1", ...(show ? {} : { NO_COLOR: "1" }) },
       show,
     });
     if (code !== 0) throw new Failure("The site could not be built: the lines above say why; put that right and start again.", { details: show ? "" : output });
