@@ -16,7 +16,7 @@ import { readWalk } from "./walk-text";
  * Any plan from a walk round it, or from the sides and diagonals of a braced polygon.
  *
  * Units: exact rational inches along the axes; bearings and adjusted readings are doubles, right to 1e-9 in.
- * Sources: closure, coordinates and area by the usual traverse rules (domain.md 5.4, 5.5); the true inset by moved lines;
+ * Source: closure, coordinates and area by the usual traverse rules (domain.md 5.4, 5.5); the true inset by moved lines;
  * least squares by variation of coordinates, fixed corners by the rank of the rigidity matrix.
  *
  * @throws CalculationError by the faulty run, leg or reading.

@@ -1,4 +1,4 @@
-import { direction, type Point } from "./point";
+import { cross, direction, minus, type Point } from "./point";
 import { outside, rowSpace, size } from "./solve-linear";
 
 export interface Pull {
@@ -66,11 +66,18 @@ function largestGroup(points: readonly Point[], space: number[][], settled: numb
   for (let first = 0; first < points.length; first += 1) {
     for (let second = first + 1; second < points.length; second += 1) {
       if (!isTight(first, second)) continue;
-      const group = points.reduce<number[]>((members, _, index) => (members.every((member) => isTight(member, index)) ? [...members, index] : members), [first, second]).filter((index, order, all) => all.indexOf(index) === order).sort((a, b) => a - b);
-      if (group.length > largest.length) largest = group;
+      const group = [first, second];
+      for (let other = 0; other < points.length; other += 1) if (!group.includes(other) && group.every((member) => isTight(member, other))) group.push(other);
+      if (group.length > largest.length || (group.length === largest.length && spread(points, group) > 2 * spread(points, largest))) largest = group;
     }
   }
-  return largest;
+  return [...largest].sort((a, b) => a - b);
+}
+
+/** How far from one line: of two groups as large, points along one side fix nothing else. */
+function spread(points: readonly Point[], group: readonly number[]): number {
+  const [first, second] = [points[group[0]!]!, points[group[1] ?? 0]!];
+  return Math.max(...group.map((index) => Math.abs(cross(minus(second, first), minus(points[index]!, first)))));
 }
 
 function isFixedWith(points: readonly Point[], space: number[][], fixed: readonly number[], pull: Pull, settled: number): boolean {
