@@ -5,11 +5,10 @@ import { materialBound } from "@/calculators/plates/boards/material-bound";
 import { planBoards, type BoardsAnswer } from "@/calculators/plates/boards/plan-boards";
 import type { JointWindows } from "@/calculators/plates/joints/joint-chains";
 import { cuttingStockCases } from "@/tests/reference/cutting-stock-cases";
+import { runs } from "@/tests/setup/runs";
 import { bestByHighs } from "@/tests/reference/cutting-judge";
 
 const always = () => true;
-/** HiGHS needs a second or two for some; `npm run prove` takes ten times as many. */
-const runs = (count: number) => (process.env.PROVE ? 10 * count : count);
 const single = (size: number) => ({ from: 0, to: size, ways: [[]], complete: true });
 const endless = (capacity: number, cost: number): BoardKind => ({ capacity, cost, count: Infinity });
 

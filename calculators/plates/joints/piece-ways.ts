@@ -35,8 +35,8 @@ function mostUseful({ perPiece, longest, spacing, apart }: PieceLimits, room: nu
 
 /** Bolts stand in the piece: the anchors left of the first, between, and right of the last do not know of each other. */
 function waysAround(stretch: LaidStretch, limits: PieceLimits, start: PieceEnd, end: PieceEnd, length: Interval, inside: readonly number[]): PieceWay[] {
-  const left = sideWays(stretch, limits, inside[0]!, start.within, -1);
-  const right = sideWays(stretch, limits, inside.at(-1)!, end.within, 1);
+  const left = sideWays(stretch, limits, inside[0]!, start, -1);
+  const right = sideWays(stretch, limits, inside.at(-1)!, end, 1);
   const ways: PieceWay[] = [];
   for (const between of countsBetween(stretch, limits, inside)) {
     left.forEach((starts, onLeft) =>
@@ -74,12 +74,13 @@ function countsInOne(stretch: LaidStretch, { spacing, apart }: PieceLimits, from
 }
 
 /** By number of anchors added beyond the outermost bolt: where the piece's end may then be. */
-function sideWays(stretch: LaidStretch, limits: PieceLimits, outermost: number, within: Interval, direction: -1 | 1): IntervalSet[] {
+function sideWays(stretch: LaidStretch, limits: PieceLimits, outermost: number, { within, fixed }: PieceEnd, direction: -1 | 1): IntervalSet[] {
   const ways: IntervalSet[] = [];
+  const farthest = !fixed ? limits.farthest : direction < 0 ? stretch.farthestAtStart : stretch.farthestAtEnd;
   let outer: IntervalSet = [[outermost, outermost]];
   const room = direction < 0 ? outermost - within[0] : within[1] - outermost;
   for (let added = 0; added <= mostUseful(limits, Math.max(0, room)); added += 1) {
-    const ends = clip(step(outer, limits.clear, limits.farthest, direction), within);
+    const ends = clip(step(outer, limits.clear, farthest, direction), within);
     ways.push(ends);
     const reachesAll = ends.length === 1 && ends[0]![0] === within[0] && ends[0]![1] === within[1];
     if (reachesAll && added + 1 >= limits.perPiece) break;
@@ -96,9 +97,10 @@ function step(set: IntervalSet, least: number, most: number, direction: -1 | 1):
 /** No bolt that counts stands in the piece: a chain of added anchors from end to end. */
 function waysWithoutBolts(stretch: LaidStretch, limits: PieceLimits, start: PieceEnd, end: PieceEnd, length: Interval): PieceWay[] {
   const places = clip(stretch.anchorPlaces, [start.within[0], end.within[1]]);
-  const toEnd: Interval = [limits.clear, limits.farthest];
+  const fromStart: Interval = [limits.clear, start.fixed ? stretch.farthestAtStart : limits.farthest];
+  const toEnd: Interval = [limits.clear, end.fixed ? stretch.farthestAtEnd : limits.farthest];
   const first = tightened({ a: start.within, b: start.within, apart: [0, 0] });
-  let chains = first === null ? [] : places.flatMap((place) => kept(extended(first, toEnd, place)));
+  let chains = first === null ? [] : places.flatMap((place) => kept(extended(first, fromStart, place)));
   const ways: PieceWay[] = [];
   for (let added = 1; added <= mostUseful(limits, end.within[1] - start.within[0]) && chains.length > 0; added += 1) {
     if (added >= limits.perPiece) {

@@ -49,8 +49,10 @@ function countsIn(stretch: LaidStretch, limits: PieceLimits, link: Link): number
   return counts;
 }
 
-function firstStep(limits: PieceLimits, isEnd: boolean): [number, number] {
-  return isEnd ? [limits.clear, limits.farthest] : [limits.apart, limits.spacing];
+/** How far an anchor must and may stand from a neighbour: a bolt, a joint, or an end of the stretch. */
+function stepFrom(stretch: LaidStretch, limits: PieceLimits, at: number, isEnd: boolean): [number, number] {
+  if (!isEnd) return [limits.apart, limits.spacing];
+  return [limits.clear, at === stretch.from ? stretch.farthestAtStart : at === stretch.to ? stretch.farthestAtEnd : limits.farthest];
 }
 
 /** Where each of `count` anchors can be, each set seen from the link's start; null when they cannot reach its end. */
@@ -59,18 +61,19 @@ function reach(stretch: LaidStretch, limits: PieceLimits, link: Link, count: num
   if (count === 0) {
     const isPiece = fromEnd && toEnd;
     const distance = to - from;
-    const inReach = fromEnd || toEnd ? distance >= limits.clear && distance <= limits.farthest : distance <= limits.spacing;
+    const [least, most] = fromEnd ? stepFrom(stretch, limits, from, true) : toEnd ? stepFrom(stretch, limits, to, true) : [0, limits.spacing];
+    const inReach = distance >= least && distance <= most;
     return !isPiece && inReach ? [] : null;
   }
   const sets: IntervalSet[] = [];
-  const [least, most] = firstStep(limits, fromEnd);
+  const [least, most] = stepFrom(stretch, limits, from, fromEnd);
   let reached = clip(intersection(spread([[from, from]], least, most), stretch.anchorPlaces), [from, to]);
   for (let index = 1; index <= count; index += 1) {
     if (reached.length === 0) return null;
     sets.push(reached);
     if (index < count) reached = clip(intersection(spread(reached, limits.apart, limits.spacing), stretch.anchorPlaces), [from, to]);
   }
-  const [leastLast, mostLast] = firstStep(limits, toEnd);
+  const [leastLast, mostLast] = stepFrom(stretch, limits, to, toEnd);
   sets[count - 1] = clip(sets[count - 1]!, [to - mostLast, to - leastLast]);
   return sets[count - 1]!.length > 0 ? sets : null;
 }
@@ -103,8 +106,8 @@ function spreadOut(stretch: LaidStretch, limits: PieceLimits, link: Link, count:
     if (index > 0) allowed = clip(sets[index - 1]!, [at[index]! - limits.spacing, at[index]! - limits.apart]);
   }
   return at.map((place, index) => {
-    const before = index === 0 ? firstStep(limits, link.fromEnd) : [limits.apart, limits.spacing];
-    const after = index === count - 1 ? firstStep(limits, link.toEnd) : [limits.apart, limits.spacing];
+    const before = index === 0 ? stepFrom(stretch, limits, link.from, link.fromEnd) : [limits.apart, limits.spacing];
+    const after = index === count - 1 ? stepFrom(stretch, limits, link.to, link.toEnd) : [limits.apart, limits.spacing];
     const left = index === 0 ? link.from : at[index - 1]!;
     const right = index === count - 1 ? link.to : at[index + 1]!;
     const room = clip(clip(stretch.anchorPlaces, [left + before[0]!, left + before[1]!]), [right - after[1]!, right - after[0]!]);

@@ -11,6 +11,9 @@ export interface Stretch {
   from: number;
   to: number;
   bolts: readonly StandingBolt[];
+  /** At this stretch's own ends, where the rule wants the first bolt nearer than at a joint. */
+  farthestAtStart?: number;
+  farthestAtEnd?: number;
 }
 
 /** What every piece must keep, in whole units; Infinity where the rule states no limit. */
@@ -32,7 +35,7 @@ export interface PieceLimits {
 }
 
 /** A stretch laid out for the search: where joints and added anchors can be at all. */
-export interface LaidStretch extends Stretch {
+export interface LaidStretch extends Required<Stretch> {
   /** Sorted; `counts` is false as well for those too near an end of the stretch. */
   bolts: readonly StandingBolt[];
   /** Gap i lies between bolt i − 1 and bolt i: a joint may stand anywhere in it. Null where there is no room. */
@@ -41,8 +44,8 @@ export interface LaidStretch extends Stretch {
   anchorPlaces: IntervalSet;
 }
 
-export function layOut(stretch: Stretch, { clear, apart }: PieceLimits): LaidStretch {
-  const { from, to } = stretch;
+export function layOut(stretch: Stretch, { clear, apart, farthest }: PieceLimits): LaidStretch {
+  const { from, to, farthestAtStart = farthest, farthestAtEnd = farthest } = stretch;
   const bolts = stretch.bolts
     .filter(({ at }) => at >= from && at <= to)
     .map(({ at, counts }) => ({ at, counts: counts && at - from >= clear && to - at >= clear }))
@@ -53,5 +56,5 @@ export function layOut(stretch: Stretch, { clear, apart }: PieceLimits): LaidStr
     return low <= high ? [Math.max(low, from + 1), Math.min(high, to - 1)] : null;
   }).map((gap) => (gap !== null && gap[0] <= gap[1] ? gap : null));
   const crowded = normalized(bolts.map(({ at }): Interval => [at - apart + 1, at + apart - 1]));
-  return { from, to, bolts, gaps, anchorPlaces: without(normalized([[from + clear, to - clear]]), crowded) };
+  return { from, to, farthestAtStart, farthestAtEnd, bolts, gaps, anchorPlaces: without(normalized([[from + clear, to - clear]]), crowded) };
 }
