@@ -22,10 +22,10 @@ export const documented = [...routeFiles.keys()].filter((address) => !address.in
 
 export const moduleOf = async (address: string) => (await import(/* @vite-ignore */ routeFiles.get(address)!)) as RouteModule;
 
-let next = 1;
+let next = Math.floor(Math.random() * 60_000) * 256;
 
-/** An address that nobody has asked from yet: a bucket of its own. */
-export const stranger = () => `203.0.${Math.floor(next / 250)}.${(next++ % 250) + 1}`;
+/** An address that nobody has asked from yet, in any file of a test run: a bucket of its own. */
+export const stranger = () => `10.${(next >> 16) & 255}.${(next >> 8) & 255}.${next++ & 255}`;
 
 interface Call {
   body?: BodyInit | object;

@@ -43,8 +43,8 @@ describe("a body", () => {
   test("at the limit is read, and one byte more is not, said beforehand or not", async () => {
     const exact = JSON.stringify("x".repeat(98));
     expect(exact).toHaveLength(100);
-    for (const headers of [{}, { "content-length": "100" }]) expect(await readJson(request(exact, { "content-type": "application/json", ...headers }), 100)).toHaveLength(98);
-    for (const headers of [{}, { "content-length": "101" }]) expect(await codeOf(readJson(request(`${exact} `, { "content-type": "application/json", ...headers }), 100))).toBe("body-too-large");
+    for (const headers of [{}, { "content-length": "100" }] as Record<string, string>[]) expect(await readJson(request(exact, { "content-type": "application/json", ...headers }), 100)).toHaveLength(98);
+    for (const headers of [{}, { "content-length": "101" }] as Record<string, string>[]) expect(await codeOf(readJson(request(`${exact} `, { "content-type": "application/json", ...headers }), 100))).toBe("body-too-large");
   });
 
   test("that goes on and on is let go of at the limit", async () => {
