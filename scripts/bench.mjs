@@ -1,0 +1,3 @@
+import { task } from "./lib/node-version.mjs";
+
+task("bench");
