@@ -2,9 +2,11 @@ import { anchors } from "./anchors";
 import { conversions } from "./conversions";
 import { inset } from "./inset";
 import type { Calculator, Operation } from "./schema";
+import { squareness } from "./squareness";
 
 /** Every calculator, in the order of the job. Pages, API, OpenAPI, short links and tests read this list. */
 export const calculators: readonly Calculator[] = [
+  squareness,
   inset,
   anchors,
   conversions,

@@ -91,13 +91,15 @@ type Settled<T> = T extends ReadLength
 
 /**
  * The input of a calculator: `shape` with `unit` and `precision` beside it, unknown fields refused, every length
- * settled in its unit. A length out of range is told together with the other faults.
+ * settled in its unit. A length out of range is told together with the other faults, and so is what `missing` finds: fields
+ * that are optional one by one but of which some are required. It sees the value before it is settled, faults and all.
  */
-export function calculatorInput<Shape extends z.ZodRawShape>(shape: Shape) {
+export function calculatorInput<Shape extends z.ZodRawShape>(shape: Shape, missing?: (value: Readonly<Record<string, unknown>>) => readonly PropertyKey[][]) {
   return z
     .strictObject({ ...commonFields, ...shape })
     .superRefine(
       (value, context) => {
+        for (const path of missing?.((value ?? {}) as Record<string, unknown>) ?? []) context.issues.push({ code: "custom", input: undefined, path, params: { code: "required" } });
         const unit = unitOf(value);
         mapLengths(value, [], (read, path) => {
           try {
