@@ -1,4 +1,4 @@
-import Fraction from "fraction.js";
+import type Fraction from "fraction.js";
 import { Length } from "../length";
 import { distance, type Point } from "../geometry/point";
 import { around } from "../geometry/polygon";

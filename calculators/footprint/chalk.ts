@@ -2,7 +2,7 @@ import { sideName } from "../geometry/corner-names";
 import { insetPolygon } from "../geometry/inset-polygon";
 import { distance, type Point } from "../geometry/point";
 import { around } from "../geometry/polygon";
-import { Length, squareRoot } from "../length";
+import { type Length, squareRoot } from "../length";
 import { CalculationError } from "../schema";
 import type { ExactPoint, Outline } from "./outline";
 

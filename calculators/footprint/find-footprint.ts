@@ -1,7 +1,7 @@
 import { cornerName, mostCorners } from "../geometry/corner-names";
 import { cross, direction, dot, minus, type Point } from "../geometry/point";
 import { around, perimeter } from "../geometry/polygon";
-import { Length } from "../length";
+import { type Length } from "../length";
 import { CalculationError, measure } from "../schema";
 import { adjustReadings, changeAlone, closureLimit, defaultReadingError, type AdjustedReadings } from "./adjust-readings";
 import type { FootprintAnswer } from "./answer";
@@ -103,7 +103,7 @@ function insideCorners(text: string | undefined, corners: number): number[] | nu
 function middlesRead({ points }: BracedNetwork, { places }: AdjustedReadings, corners: readonly Point[]): Bow[] {
   return points.flatMap((point, index) => {
     const place = places[index];
-    if (!point.middle || place == null) return [];
+    if (!point.middle || place === null || place === undefined) return [];
     const from = corners[point.corner]!;
     const along = direction(from, around(corners, point.corner + 1));
     return [{ side: point.corner, station: dot(along, minus(place, from)), outward: -cross(along, minus(place, from)) }];

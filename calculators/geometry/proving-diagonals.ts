@@ -53,7 +53,7 @@ function bestPlan(ring: readonly Point[], best: (Plan | null)[][], seen: boolean
   let chosen: Plan | null = null;
   for (let apex = from + 1; apex < to; apex += 1) {
     const [left, right] = [best[from]![apex], best[apex]![to]];
-    if (left == null || right == null || cross(minus(ring[apex]!, ring[from]!), minus(ring[to]!, ring[from]!)) <= 0) continue;
+    if (!left || !right || cross(minus(ring[apex]!, ring[from]!), minus(ring[to]!, ring[from]!)) <= 0) continue;
     const sine = Math.abs(cross(direction(ring[apex]!, ring[from]!), direction(ring[apex]!, ring[to]!)));
     const sharpness = Math.min(sine, left.sharpness, right.sharpness);
     const total = left.total + right.total + distance(ring[from]!, ring[to]!);
