@@ -8,7 +8,7 @@ export async function staticPages(site) {
   for (const path of paths) {
     const response = await fetch(site.address + path);
     await response.arrayBuffer();
-    if (response.status !== 200 || response.headers.get("x-nextjs-prerender") !== "1") dynamic.push(`${path} (${response.status})`);
+    if (response.status !== 200 || !/^1\b/.test(response.headers.get("x-nextjs-prerender") ?? "")) dynamic.push(`${path} (${response.status})`);
   }
   if (dynamic.length > 0) console.log(`Not static: ${dynamic.join(", ")}`);
   return [row("public pages that are static", `${paths.length - dynamic.length} of ${paths.length}`, { aim: "all", met: paths.length > 0 && dynamic.length === 0 })];
