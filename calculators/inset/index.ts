@@ -18,9 +18,9 @@ export const insetOperation = defineOperation({
     { id: "sevenSixteenths", input: { length: "28 ft", width: "40 ft", inset: "7/16" }, answer: { lines: { ab: { text: "27' 11 1/8\"" }, bc: { text: "39' 11 1/8\"" } }, diagonal: { text: "48' 8 11/16\"" } }, source: "domain.md N02" },
     {
       id: "wrongMark",
-      input: { length: "28 ft", width: "24 ft", inset: "1/2", burn: "1", slabDiagonals: { ac: "443 1/2", bd: "443 9/16" }, chalkDiagonals: { ac: "441 1/2", bd: "441 9/16" } },
-      answer: { check: { agrees: false } },
-      source: "arithmetic: a line 1 in too far in shortens both diagonals by 24/36.9 or 28/36.9 of an inch",
+      input: { length: "28 ft", width: "24 ft", inset: "1/2", burn: "1", slabDiagonals: { ac: "443 9/16", bd: "443 9/16" }, chalkDiagonals: { ac: "441 1/2", bd: "441 1/2" } },
+      answer: { check: { agrees: false }, ask: "chalk-lines" },
+      source: "arithmetic: with A-B 1 in too far in the chalk is 335 by 286, its diagonal 440.476 in, read 441 1/2",
     },
   ],
 });
