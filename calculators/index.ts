@@ -1,5 +1,6 @@
 import { anchors } from "./anchors";
 import { conversions } from "./conversions";
+import { corner } from "./corner";
 import { inset } from "./inset";
 import type { Calculator, Operation } from "./schema";
 import { squareness } from "./squareness";
@@ -7,6 +8,7 @@ import { squareness } from "./squareness";
 /** Every calculator, in the order of the job. Pages, API, OpenAPI, short links and tests read this list. */
 export const calculators: readonly Calculator[] = [
   squareness,
+  corner,
   inset,
   anchors,
   conversions,

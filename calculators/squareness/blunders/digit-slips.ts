@@ -1,4 +1,4 @@
-import { Length } from "../../length";
+import { type Length } from "../../length";
 
 /** A reading as it may have stood on the tape, by how many inches it then differs from what was written. */
 export interface DigitSlip {

@@ -1,4 +1,4 @@
-import Fraction from "fraction.js";
+import type Fraction from "fraction.js";
 import { Length, squareRoot, type Precision } from "../../length";
 import { CalculationError, measure, type Issue } from "../../schema";
 import type { Diagonal, ReadingName } from "../input";
