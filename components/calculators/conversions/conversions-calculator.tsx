@@ -1,6 +1,6 @@
 "use client";
 
-import type { ReactNode } from "react";
+import { memo, type ReactNode } from "react";
 import type { ConversionsAnswer, conversionsAnswer, StripOperation } from "@/calculators/conversions";
 import { LengthField } from "@/components/length-field/length-field";
 import { LengthAnswer } from "@/components/ui/length-answer";
@@ -113,8 +113,11 @@ export function ConversionsCalculator({ header, initial }: { header: ReactNode; 
   );
 }
 
-/** The length in its everyday form, and the two forms most often asked for beside it. */
-function TotalVerdict({ answer, metric }: { answer: ConversionsAnswer; metric: boolean }) {
+/**
+ * Results are memos: a key press renders the page at once with the answer as it was, and again when the new one is worked out.
+ * This one is the length in its everyday form, and the two forms most often asked for beside it.
+ */
+const TotalVerdict = memo(function TotalVerdict({ answer, metric }: { answer: ConversionsAnswer; metric: boolean }) {
   const t = useTranslate();
   const digits = ({ text }: { text: string }) => text.split(" ")[0] ?? "";
   return (
@@ -130,4 +133,4 @@ function TotalVerdict({ answer, metric }: { answer: ConversionsAnswer; metric: b
       </p>
     </Verdict>
   );
-}
+});

@@ -1,12 +1,13 @@
 "use client";
 
+import { memo } from "react";
 import type { ConversionsAnswer } from "@/calculators/conversions";
 import { LengthAnswer } from "@/components/ui/length-answer";
 import { LengthText } from "@/components/ui/length-text";
 import { useTranslate } from "@/lib/client/i18n/messages-context";
 
 /** The length in equal spaces: to scale on a line, and each mark from zero, since a chain of rounded spaces drifts. */
-export function EqualSpaces({ spacing, total }: { spacing: NonNullable<ConversionsAnswer["spacing"]>; total: ConversionsAnswer["total"] }) {
+export const EqualSpaces = memo(function EqualSpaces({ spacing, total }: { spacing: NonNullable<ConversionsAnswer["spacing"]>; total: ConversionsAnswer["total"] }) {
   const t = useTranslate();
   const { count, each, marks } = spacing;
   const places = Array.from({ length: count + 1 }, (_, mark) => (mark / count) * 100);
@@ -32,4 +33,4 @@ export function EqualSpaces({ spacing, total }: { spacing: NonNullable<Conversio
       </ol>
     </section>
   );
-}
+});

@@ -1,5 +1,6 @@
 "use client";
 
+import { memo } from "react";
 import type { ConversionsAnswer } from "@/calculators/conversions";
 import { LengthText } from "@/components/ui/length-text";
 import { useTranslate } from "@/lib/client/i18n/messages-context";
@@ -11,7 +12,7 @@ const metricFirst = ["millimetres", "metres", "centimetres", "feetInches", "inch
 const places = { in: 4, mm: 3 } as const;
 
 /** Every form of the length, and by how much what is shown is more or less than the true length. */
-export function FormsTable({ answer, metric }: { answer: ConversionsAnswer; metric: boolean }) {
+export const FormsTable = memo(function FormsTable({ answer, metric }: { answer: ConversionsAnswer; metric: boolean }) {
   const t = useTranslate();
   const shown = (form: (typeof forms)[number]) => {
     const { text } = answer[form];
@@ -51,4 +52,4 @@ export function FormsTable({ answer, metric }: { answer: ConversionsAnswer; metr
       </tbody>
     </table>
   );
-}
+});

@@ -1,5 +1,6 @@
 "use client";
 
+import { memo } from "react";
 import type { ConversionsAnswer } from "@/calculators/conversions";
 import type { Precision } from "@/calculators/length";
 import { useTranslate } from "@/lib/client/i18n/messages-context";
@@ -9,7 +10,7 @@ import { bladeWindow } from "./blade-window";
 const labelRoom = 17;
 
 /** The tape where the answer stands: its graduation in red, and in blue where the true length falls when they differ. */
-export function ResultBlade({ answer, precision, single }: { answer: ConversionsAnswer | null; precision: Precision; single: boolean }) {
+export const ResultBlade = memo(function ResultBlade({ answer, precision, single }: { answer: ConversionsAnswer | null; precision: Precision; single: boolean }) {
   const t = useTranslate();
   const metric = precision.endsWith("mm");
   const trueInches = answer?.total.in ?? null;
@@ -68,4 +69,4 @@ export function ResultBlade({ answer, precision, single }: { answer: Conversions
       <figcaption className="plan-caption">{description}</figcaption>
     </figure>
   );
-}
+});
