@@ -24,7 +24,7 @@ export const batchEnvelope = z.strictObject({ items: z.array(z.unknown()).min(1)
 export { batchItem };
 
 const answered = z.strictObject({ status: z.literal(200), answer: z.record(z.string(), z.unknown()).meta({ description: "What that operation answers" }) });
-const failed = z.strictObject({ status: z.int().meta({ description: "What the operation alone would have answered" }), problem: problemAnswer });
+const failed = z.strictObject({ status: z.int().min(400).max(599).meta({ description: "What the operation alone would have answered" }), problem: problemAnswer });
 
 export const batchAnswer = z
   .strictObject({ items: z.array(z.union([answered, failed])).meta({ description: "One for each item of the request, in its order" }) })

@@ -14,7 +14,7 @@ export const problemAnswer = z
   .strictObject({
     type: z.string().meta({ description: "A page that explains this kind of problem" }),
     title: z.string().meta({ description: "The kind of problem in words" }),
-    status: z.int().meta({ description: "The status of the answer" }),
+    status: z.int().min(400).max(599).meta({ description: "The status of the answer" }),
     detail: z.string().meta({ description: "What to do about it" }),
     code: z.enum(problemCodes).meta({ description: "The kind of problem; never changes with language" }),
     requestId: z.string().meta({ description: "Names this request in our log" }),
