@@ -1,4 +1,4 @@
-import { minimax, type Question } from "./minimax";
+import { minimax, type Minimax, type Question } from "./minimax";
 import { cornersAt, placesOf, type Place, type Pose, type Slab } from "./plan";
 import { heldAngle, heldPose, type Placing } from "./poses";
 import { balanceAt, searchAngle, type Found } from "./search-angle";
@@ -32,6 +32,9 @@ const gap = { rigid: 1e-7, free: 1e-5 };
 /** Places that do not decide the worst departure are made as good as they can be, as far as this much searching goes. */
 const rest = { gap: 1e-4, intervals: 120 };
 
+/** Settled places keep this much room (inches), so that rounding cannot shut the figure found out. */
+const slack = 1e-9;
+
 /**
  * The best fit: the pose whose worst departure from the wanted inset is least, then, of those, whose worst departure at
  * the places still free to move is least, and so on. Overhang is kept within its limit where any pose can.
@@ -46,9 +49,11 @@ export function bestFit(slab: Slab, placing: Placing, overhang: number): Laid {
   const question: Question = { overhang: limited.kept ? overhang : null, settled };
   const found = limited.found;
   const weights = balanceAt(slab, placing, question, found.angle) ?? found.weights;
-  const settledPose = settleRest(slab, placing, question, found, weights);
-  const pose = placing.poseAt(settledPose.angle);
-  return { ...laidOut(slab, pose, settledPose.unknowns, settledPose.angle), fits: limited.fits, overhangNeeded: limited.needed, certificate: { proved: found.proved, lowerBound: found.lowerBound, weights } };
+  const { angle } = settleRest(slab, placing, question, found, weights);
+  const pose = placing.poseAt(angle);
+  const places = placesOf(slab, pose);
+  const first = minimax(places, placing.unknowns, question) ?? found;
+  return { ...laidOut(slab, pose, restAt(places, placing.unknowns, question, first).unknowns, angle), fits: limited.fits, overhangNeeded: limited.needed, certificate: { proved: found.proved, lowerBound: found.lowerBound, weights } };
 }
 
 /** One chalk line along its slab edge at the wanted inset; what is left slides to where the worst departure is least. */
@@ -61,17 +66,7 @@ export function heldFit(slab: Slab, placing: Placing, held: number, overhang: nu
   const question = kept === null ? { ...limits, overhang: null } : limits;
   const first = kept ?? minimax(places, unknowns, question);
   if (first === null) throw new Error("The held fit has no answer");
-  let last = first;
-  const settled = [...question.settled];
-  for (let level = 0; level < unknowns + 1 && last.worst > 1e-9; level += 1) {
-    const worst = last.worst;
-    last.weights.forEach((weight, place) => {
-      if (weight > 1e-6) settled[place] ??= worst + 1e-9;
-    });
-    const next = minimax(places, unknowns, { ...question, settled });
-    if (next === null) break;
-    last = next;
-  }
+  const last = restAt(places, unknowns, question, first);
   const needed = kept === null ? (minimax(places, unknowns, { ...question, leastOverhang: true })?.worst ?? null) : null;
   return { ...laidOut(slab, pose, last.unknowns, heldAngle(slab, placing, held)), fits: kept !== null, overhangNeeded: needed, certificate: { proved: true, lowerBound: first.worst, weights: first.weights } };
 }
@@ -99,7 +94,23 @@ function withinOverhang(slab: Slab, placing: Placing, overhang: number, free: Fo
   return kept === null ? { found: free, kept: false, fits: most <= overhang + 1e-9, needed: least?.worst ?? null } : { found: kept, kept: true, fits: true, needed: null };
 }
 
-/** Places that decide the worst keep it; the others are asked again, until nothing is free to move. */
+/** At one angle: places that decide the worst keep it; the others are asked again, until nothing is free to move. */
+function restAt(places: readonly Place[], unknowns: number, question: Question, first: Minimax): Minimax {
+  let last = first;
+  const settled = [...question.settled];
+  for (let level = 0; level < unknowns + 1 && last.worst > 1e-9; level += 1) {
+    const worst = last.worst;
+    last.weights.forEach((weight, place) => {
+      if (weight > 1e-6) settled[place] ??= worst + slack;
+    });
+    const next = minimax(places, unknowns, { ...question, settled });
+    if (next === null) break;
+    last = next;
+  }
+  return last;
+}
+
+/** The same over all angles: places that decide the worst keep it; the others are asked again. */
 function settleRest(slab: Slab, placing: Placing, question: Question, found: Found, firstWeights: readonly number[]): Found {
   const settled = [...question.settled];
   let last = found;
@@ -108,7 +119,7 @@ function settleRest(slab: Slab, placing: Placing, question: Question, found: Fou
     const worst = last.worst;
     const deciding = weights.flatMap((weight, place) => (weight > 1e-6 && settled[place] === null ? [place] : []));
     if (deciding.length === 0) break;
-    for (const place of deciding) settled[place] = worst + 1e-9;
+    for (const place of deciding) settled[place] = worst + slack;
     if (settled.every((limit) => limit !== null)) break;
     const next = searchAngle(slab, placing, { ...question, settled }, rest.gap, { starts: [last.angle], intervals: rest.intervals });
     if (next === null) break;
