@@ -123,6 +123,14 @@ test.describe("without script", () => {
     await expect(form(page, "Decimal feet")).toContainText("9.2600 ft");
   });
 
+  test("a length alone stays one", async ({ page }) => {
+    await page.goto(path);
+    await page.locator("#field-value").fill("8.276 ft");
+    await page.getByRole("button", { name: "Calculate" }).click();
+    await expect(verdict(page)).toHaveText(`8' 3 5/16" scant`); // 99.312 beside 99.3125
+    await expect(page.locator("#field-value")).toHaveValue("8.276 ft");
+  });
+
   test("a fault is told there too, in Spanish as well", async ({ page }) => {
     await page.goto(`/es${path}/answer?value=3-1/2`);
     await expect(page.locator(".field-error")).toContainText(`3' 0 1/2"`);

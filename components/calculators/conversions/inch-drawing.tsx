@@ -21,7 +21,7 @@ export function InchDrawing({ t }: { t: Translate }) {
     { place: 11, text: "11/16" },
   ];
   return (
-    <svg className="plan" viewBox="0 0 640 230" role="img" aria-label={t("conversions.page.inchDrawing")}>
+    <svg className="plan inch-drawing" viewBox="0 0 640 230" role="img" aria-label={t("conversions.page.inchDrawing")}>
       <rect x="0" y={top} width="640" height="170" fill="var(--blade)" stroke="var(--edge-strong)" strokeWidth="1.5" />
       {ticks.map(({ place, x, height }) => (
         <line key={place} x1={x} x2={x} y1={top} y2={top + height} stroke="var(--ink)" strokeWidth={place % 16 === 0 ? 3 : 2} />

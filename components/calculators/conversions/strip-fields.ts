@@ -34,8 +34,8 @@ export function withoutBlankEnd(input: Record<string, unknown>): Record<string, 
 }
 
 /**
- * A form sent without script holds the length and some lines, blank ones among them: the filled lines follow each other,
- * behind the length.
+ * A form sent without script holds the length and some lines, blank ones among them: the filled lines follow each other
+ * behind the length, and without any the length stands alone.
  */
 export function foldLines(query: SearchParams): SearchParams {
   const first = (name: string) => [query[name]].flat()[0]?.trim() ?? "";
@@ -45,9 +45,8 @@ export function foldLines(query: SearchParams): SearchParams {
     .sort((a, b) => a - b)
     .map((row) => ({ op: first(opField(row)), value: first(valueField(row)) }))
     .filter(({ value }) => value !== "");
-  if (lines.length === 0) return query;
+  const rest = Object.entries(query).filter(([name]) => !/^strip\.\d{1,3}\.(op|value)$/.test(name) && (lines.length === 0 || name !== "value"));
   const value = first("value");
-  if (value !== "") lines.unshift({ op: "add", value });
-  const rest = Object.entries(query).filter(([name]) => name !== "value" && !/^strip\.\d{1,3}\.(op|value)$/.test(name));
+  if (lines.length > 0 && value !== "") lines.unshift({ op: "add", value });
   return Object.fromEntries([...rest, ...lines.flatMap((line, row): [string, string][] => [[opField(row), line.op], [valueField(row), line.value]])]);
 }
