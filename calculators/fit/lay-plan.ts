@@ -4,7 +4,7 @@ import { forSides } from "../geometry/per-side";
 import { distance } from "../geometry/point";
 import { around, insideAngles } from "../geometry/polygon";
 import type { Length } from "../length";
-import { CalculationError } from "../schema";
+import { CalculationError, measure } from "../schema";
 import type { FitAnswer } from "./answer";
 import { bestFit, followFit, heldFit, type Laid } from "./best-fit";
 import { describeFit } from "./describe-fit";
@@ -43,12 +43,12 @@ export function layPlan(input: FitInput): FitAnswer {
 
 type Bows = { station: Length; outward: Length }[][];
 
-function bowsOf({ edges = [] }: FitInput, { points }: BuiltSlab): Bows {
+function bowsOf({ edges = [], precision }: FitInput, { points }: BuiltSlab): Bows {
   const bows: Bows = points.map(() => []);
   edges.forEach(({ wall, station, offset }, index) => {
     const side = sideNumber(wall, points.length, `/edges/${index}/wall`);
     const length = distance(points[side]!, around(points, side + 1));
-    if (station.toNumber() > length) throw new CalculationError([{ pointer: `/edges/${index}/station`, code: "station-past-side", params: { inches: length } }]);
+    if (station.toNumber() > length) throw new CalculationError([{ pointer: `/edges/${index}/station`, code: "station-past-side", params: { most: measure(length, precision).text } }]);
     bows[side]!.push({ station, outward: offset });
   });
   return bows.map((list) => list.sort((a, b) => a.station.compare(b.station)));

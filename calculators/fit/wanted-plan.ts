@@ -49,10 +49,10 @@ function rectangle({ length, width }: NonNullable<FitInput["size"]>, slab: Built
   return { exact, points: exact.map(({ x, y }) => ({ x: x.toNumber(), y: y.toNumber() })), sized: true };
 }
 
-function fromWalk(text: string, { unit }: FitInput): WantedPlan {
+function fromWalk(text: string, { unit, precision }: FitInput): WantedPlan {
   const { legs, issues } = readWalk(text, unit, "/walk");
   if (issues.length > 0) throw new CalculationError(issues);
-  const { outline } = closeWalk(legs, () => "/walk");
+  const { outline } = closeWalk(legs, () => "/walk", precision);
   return { points: outline.points, exact: outline.exact, sized: true };
 }
 

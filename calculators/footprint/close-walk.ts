@@ -1,4 +1,4 @@
-import { Length } from "../length";
+import { Length, printLength, type Precision } from "../length";
 import { crossingSides, signedArea } from "../geometry/polygon";
 import { CalculationError } from "../schema";
 import { balance } from "./balance";
@@ -28,10 +28,10 @@ const worstClosure = 50;
  *
  * @throws CalculationError `too-few-corners`, `doubles-back`, `walk-open` or `walk-crosses`, each by the run.
  */
-export function closeWalk(given: readonly Leg[], pointer: (run: number) => string): ClosedWalk {
+export function closeWalk(given: readonly Leg[], pointer: (run: number) => string, precision: Precision): ClosedWalk {
   const notes: Note[] = [];
   const legs = joined(given, notes, pointer);
-  const whole = withClosingLeg(legs, notes, pointer);
+  const whole = withClosingLeg(legs, notes, pointer, precision);
   const closure = closureOf(whole);
   const walked = whole.reduce((sum, leg) => sum.plus(leg.length), Length.zero);
   const suspects = asNumber(closure.distance) === 0 ? [] : suspectRuns(whole, closure);
@@ -73,11 +73,11 @@ function turnBetween(first: Leg, second: Leg): number {
   return least < 1e-9 ? 0 : least > 180 - 1e-9 ? 180 : least;
 }
 
-function withClosingLeg(legs: readonly Leg[], notes: Note[], pointer: (run: number) => string): Leg[] {
+function withClosingLeg(legs: readonly Leg[], notes: Note[], pointer: (run: number) => string, precision: Precision): Leg[] {
   const { east, north, distance, oneIn } = closureOf(legs);
   const refuse = () => {
     const back = towardAt((Math.atan2(-asNumber(east), -asNumber(north)) * 180) / Math.PI);
-    return new CalculationError([{ pointer: pointer(0), code: "walk-open", params: { toward: printToward(back), inches: Math.round(asNumber(distance) * 1000) / 1000 } }]);
+    return new CalculationError([{ pointer: pointer(0), code: "walk-open", params: { toward: printToward(back), distance: printLength(distance, precision) } }]);
   };
   const added = (leg: Leg) => {
     notes.push(note("closing-leg-added", { toward: printToward(leg.toward), length: leg.length }));

@@ -51,7 +51,7 @@ export function describeOutline(outline: Outline, { inset, bows = [], burn, prec
       return { side: sideName(index, count), toward: outline.toward[index] ?? null, length: show(length), inset: insets && show(insets[index]!), chalk: chalk && show(chalk.lengths[index]!), middle: { station: show(half), ...middle } };
     }),
     checks: checksOf(outline, chalk, burn ?? Length.zero, precision),
-    bows: [...bowsGiven(outline, bows), ...read].map(({ side, station, outward }) => ({
+    bows: [...bowsGiven(outline, bows, precision), ...read].map(({ side, station, outward }) => ({
       side: sideName(side, count),
       station: show(station),
       outward: show(outward),
@@ -83,13 +83,13 @@ function checksOf({ points, exact }: Outline, chalk: Chalk | null, burn: Length,
   }));
 }
 
-function bowsGiven({ points, sides }: Outline, bows: NonNullable<FootprintInput["bows"]>): Bow[] {
+function bowsGiven({ points, sides }: Outline, bows: NonNullable<FootprintInput["bows"]>, precision: FootprintInput["precision"]): Bow[] {
   const names = sideNames(points.length);
   return bows.map(({ side, station, outward }, index) => {
     const at = names.indexOf(side.trim().toLowerCase());
     if (at < 0) throw new CalculationError([{ pointer: `/bows/${index}/side`, code: "side-unknown", params: { found: side.slice(0, 8), first: names[0]!, last: names.at(-1)! } }]);
     const length = sides[at]!;
-    if (station !== undefined && station.toNumber() > asNumber(length)) throw new CalculationError([{ pointer: `/bows/${index}/station`, code: "station-past-side", params: { inches: asNumber(length) } }]);
+    if (station !== undefined && station.toNumber() > asNumber(length)) throw new CalculationError([{ pointer: `/bows/${index}/station`, code: "station-past-side", params: { most: measure(length, precision).text } }]);
     return { side: at, station: station ?? (typeof length === "number" ? length / 2 : length.over(2)), outward };
   });
 }

@@ -30,7 +30,7 @@ export function findFootprint(input: FootprintInput): FootprintAnswer {
 }
 
 function fromWalk(input: FootprintInput): FootprintAnswer {
-  const { outline, closure, walked, notes, suspects } = closeWalk(legsOf(input), (run) => (input.runs === undefined || input.runs.length === 0 ? "/walk" : run === 0 || run > input.runs.length ? "/runs" : `/runs/${run - 1}`));
+  const { outline, closure, walked, notes, suspects } = closeWalk(legsOf(input), (run) => (input.runs === undefined || input.runs.length === 0 ? "/walk" : run === 0 || run > input.runs.length ? "/runs" : `/runs/${run - 1}`), input.precision);
   if (outline.points.length > mostCorners) throw new CalculationError([{ pointer: input.walk === undefined ? "/runs" : "/walk", code: "too-many-corners", params: { limit: mostCorners } }]);
   const show = (value: Length | number) => measure(value, input.precision);
   return {
