@@ -4,7 +4,7 @@ import type { SquarenessAnswer } from "./answer";
 import { findSuspects, type Suspect } from "./blunders/find-suspects";
 import { separatingPull, type PullEnd } from "./blunders/separating-pull";
 import { anglesOf, cornerNames } from "./figure/corners";
-import { closes, solveFigure, type Figure } from "./figure/solve-figure";
+import { solveFigure, type Figure } from "./figure/solve-figure";
 import { readingNames, type ReadingName, type SquarenessInput } from "./input";
 import { burnOf, hasFourSides, inches, less, magnitude, measurementsOf, plus, type Measured, type Measurements, type Quantity } from "./readings";
 import { shownBy, totalOf } from "./tape/correct-tape";
@@ -38,7 +38,7 @@ export function checkSquare(input: SquarenessInput): SquarenessAnswer {
   const difference = magnitude(signed);
   const tapers = tapersOf(figure);
   const closureLimit = closureFactor * (input.readingError ?? defaultReadingError).toNumber();
-  const suspects = findSuspects(measurements, { commonBurn: input.burn ?? Length.zero, metric: readsMetric(input), changeOf: figure.changeOf });
+  const suspects = findSuspects(measurements, { commonBurn: input.burn ?? Length.zero, metric: readsMetric(input), closedBy: figure.closedBy });
   const angles = anglesOf(figure.corners);
   const shape = shapeOf(difference, tapers, graduation(precision).toNumber());
   const allowed = allowedFor(input, figure.corners);
@@ -66,7 +66,7 @@ export function checkSquare(input: SquarenessInput): SquarenessAnswer {
     closureIn: figure.closure,
     closureLimitIn: closureLimit,
     suspects: suspects.map(({ reading, change, likely }) => ({ reading, changeIn: change, likely, shown: show(inches(measurements[reading]!.actual) + change) })),
-    separatingPull: pullAnswer(input, measurements, figure, suspects, closureLimit),
+    separatingPull: pullAnswer(input, measurements, suspects, closureLimit),
     proves: proofsOf(measurements, contradictory, difference, tapers, graduation(precision).toNumber()),
   };
 }
@@ -125,9 +125,8 @@ function readingsAnswer(measurements: Measurements, { adjusted }: Figure, show: 
   };
 }
 
-function pullAnswer(input: SquarenessInput, measurements: Measurements, figure: Figure, suspects: readonly Suspect[], leastGap: number): SquarenessAnswer["separatingPull"] {
-  const hypotheses = suspects.map(({ reading, change }) => ({ suspect: reading, corners: figure.without(reading, change) })).filter(({ corners }) => closes(corners));
-  const found = separatingPull(hypotheses, {
+function pullAnswer(input: SquarenessInput, measurements: Measurements, suspects: readonly Suspect[], leastGap: number): SquarenessAnswer["separatingPull"] {
+  const found = separatingPull(suspects.map(({ reading, corners }) => ({ suspect: reading, corners })), {
     lengthOf: (name) => {
       const known = readingNames.find((reading) => reading === name.toLowerCase());
       const measured = known === undefined ? undefined : measurements[known];

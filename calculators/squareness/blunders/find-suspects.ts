@@ -1,4 +1,6 @@
 import type { Length } from "../../length";
+import type { Corners } from "../figure/corners";
+import type { Figure } from "../figure/solve-figure";
 import type { ReadingName } from "../input";
 import type { Measurements } from "../readings";
 import { digitSlips } from "./digit-slips";
@@ -11,6 +13,8 @@ export interface Suspect {
   /** Inches to add to it; that alone closes the figure. */
   change: number;
   likely: Blunder;
+  /** The slab as it is if so. */
+  corners: Corners;
 }
 
 /** A change this near a blunder's size, in inches, may be that blunder. */
@@ -19,7 +23,7 @@ export const slipWithin = 3 / 16;
 interface Context {
   commonBurn: Length;
   metric: boolean;
-  changeOf: (name: ReadingName) => number | null;
+  closedBy: Figure["closedBy"];
 }
 
 /**
@@ -27,11 +31,12 @@ interface Context {
  * (missed, or taken twice; or held there though none was told), of 12 in, or of a slip of digits in the reading as read.
  * One redundancy cannot tell which, so all that fit are named, the closest fit first. Slips under 3/8 in are no blunders.
  */
-export function findSuspects(measurements: Measurements, { commonBurn, metric, changeOf }: Context): Suspect[] {
+export function findSuspects(measurements: Measurements, { commonBurn, metric, closedBy }: Context): Suspect[] {
   const named = (Object.keys(measurements) as ReadingName[]).flatMap((name): (Suspect & { miss: number })[] => {
     const { reading, burn, actual } = measurements[name]!;
-    const change = changeOf(name);
-    if (change === null) return [];
+    const closed = closedBy(name);
+    if (closed === null) return [];
+    const { change, corners } = closed;
     const asRead = reading ?? (typeof actual === "number" ? null : actual);
     const slips: { likely: Blunder; inches: number }[] = [
       ...burnSlips(burn.toNumber(), commonBurn.toNumber(), metric),
@@ -43,9 +48,9 @@ export function findSuspects(measurements: Measurements, { commonBurn, metric, c
       .filter((slip) => Math.abs(slip.inches) >= 2 * slipWithin)
       .map(({ likely, inches: size }) => ({ likely, miss: Math.abs(change - size) }))
       .reduce<{ likely: Blunder; miss: number } | null>((least, slip) => (least === null || slip.miss < least.miss - 1e-9 ? slip : least), null);
-    return best !== null && best.miss <= slipWithin ? [{ reading: name, change, ...best }] : [];
+    return best !== null && best.miss <= slipWithin ? [{ reading: name, change, corners, ...best }] : [];
   });
-  return named.sort((a, b) => a.miss - b.miss).map(({ reading, change, likely }) => ({ reading, change, likely }));
+  return named.sort((a, b) => a.miss - b.miss).map(({ reading, change, likely, corners }) => ({ reading, change, likely, corners }));
 }
 
 /** A burn told but not held leaves the length short; held twice, long. Where none was told, it may have been held all the same. */

@@ -41,20 +41,35 @@ export function adjustQuadrilateral(measured: Six): Adjusted | null {
 }
 
 /**
- * The change of one reading that alone would close the figure: −w/aᵢ, repeated until nothing is left of w.
- * Null when no length in that place closes it.
+ * Two triangles on one base, each as its apex's distances from the base's two ends; the reading in question is the distance
+ * between the apexes, on the same side of the base for a side, on both sides for a diagonal.
+ */
+const triangles: Readonly<Record<ReadingName, { base: ReadingName; one: readonly [ReadingName, ReadingName]; other: readonly [ReadingName, ReadingName]; sign: 1 | -1 }>> = {
+  ab: { base: "cd", one: ["ac", "da"], other: ["bc", "bd"], sign: 1 },
+  bc: { base: "da", one: ["bd", "ab"], other: ["cd", "ac"], sign: 1 },
+  cd: { base: "ab", one: ["ac", "bc"], other: ["da", "bd"], sign: 1 },
+  da: { base: "bc", one: ["ab", "ac"], other: ["bd", "cd"], sign: 1 },
+  ac: { base: "bd", one: ["ab", "da"], other: ["bc", "cd"], sign: -1 },
+  bd: { base: "ac", one: ["ab", "bc"], other: ["da", "cd"], sign: -1 },
+};
+
+/**
+ * The change of one reading that alone would close the figure: to first order −w/aᵢ, here exactly, from the figure of the
+ * other five, since a foot or a slip of digits is too far for a slope. Null when the other five make no figure.
  */
 export function changeThatCloses(measured: Six, name: ReadingName): number | null {
-  let six = measured;
-  for (let round = 0; round < 60; round += 1) {
-    const misclosure = misclosureOf(six);
-    if (misclosure === null) return null;
-    if (Math.abs(misclosure.w) < 1e-10 * measured[name]) return six[name] - measured[name];
-    const next = six[name] - misclosure.w / misclosure.gradient[name];
-    if (!(next > 0)) return null;
-    six = { ...six, [name]: next };
-  }
-  return null;
+  const { base, one, other, sign } = triangles[name];
+  const first = apexOf(measured[base], measured[one[0]], measured[one[1]]);
+  const second = apexOf(measured[base], measured[other[0]], measured[other[1]]);
+  if (first === null || second === null) return null;
+  return Math.hypot(first.along - second.along, first.up - sign * second.up) - measured[name];
+}
+
+/** Where the apex stands, along the base from its first end and square to it; null when there is no triangle. */
+function apexOf(base: number, fromFirst: number, fromSecond: number): { along: number; up: number } | null {
+  const along = (base * base + fromFirst * fromFirst - fromSecond * fromSecond) / (2 * base);
+  const square = fromFirst * fromFirst - along * along;
+  return square > 0 ? { along, up: Math.sqrt(square) } : null;
 }
 
 export function sixOf(length: (name: ReadingName) => number): Six {

@@ -5,7 +5,7 @@ import type { Diagonal, ReadingName } from "../input";
 import { hasFourSides, inches, less, magnitude, plus, pointerOf, type Measurements, type Quantity } from "../readings";
 import { adjustQuadrilateral, changeThatCloses, sixOf } from "./adjust-quadrilateral";
 import { misclosureOf, type Six } from "./braced-quadrilateral";
-import { isConvex, lengthsOf, parallelogram, placeCorners, type Corners } from "./corners";
+import { isConvex, parallelogram, placeCorners, type Corners } from "./corners";
 
 /** The slab as the readings make it. */
 export interface Figure {
@@ -18,10 +18,8 @@ export interface Figure {
   targetDiagonal: Quantity;
   /** How far CD must slide toward D; negative toward C. */
   slide: Quantity;
-  /** The change of one reading that alone would close the figure; null when none does. */
-  changeOf: (name: ReadingName) => number | null;
-  /** The figure with one reading changed so that it closes. */
-  without: (name: ReadingName, change: number) => Corners;
+  /** The change of one reading that alone would close the figure, and the slab it then is; null when none does. */
+  closedBy: (name: ReadingName) => { change: number; corners: Corners } | null;
 }
 
 /**
@@ -67,8 +65,10 @@ function solveFour(measurements: Measurements): Figure {
     adjusted: solved.adjusted,
     targetDiagonal: Math.sqrt(ab * cd + bc * da),
     slide: (ac * ac - bd * bd) / (2 * (ab + corners.C.x - corners.D.x)),
-    changeOf: (name) => changeThatCloses(measured, name),
-    without: (name, change) => placeCorners({ ...measured, [name]: measured[name] + change }),
+    closedBy: (name) => {
+      const change = changeThatCloses(measured, name);
+      return change === null ? null : closed(change, placeCorners({ ...measured, [name]: measured[name] + change }));
+    },
   };
 }
 
@@ -89,8 +89,11 @@ function solveTwo({ ab, da, ac, bd }: Measurements): Figure {
     adjusted: null,
     targetDiagonal: bothSquared(ab.actual, da.actual),
     slide: exactSlide(ab.actual, ac.actual, bd.actual),
-    changeOf: (name) => (name in rest && rest[name as keyof Four] > 0 ? Math.sqrt(rest[name as keyof Four]) - four[name as keyof Four] : null),
-    without: (name, change) => cornersOf({ ...four, [name]: four[name as keyof Four] + change }),
+    closedBy: (name) => {
+      if (!isOfFour(name) || !(rest[name] > 0)) return null;
+      const alone = Math.sqrt(rest[name]);
+      return closed(alone - four[name], cornersOf({ ...four, [name]: alone }));
+    },
   };
 }
 
@@ -112,7 +115,11 @@ function exactSlide(ab: Quantity, ac: Quantity, bd: Quantity): Quantity {
   return (inches(ac) ** 2 - inches(bd) ** 2) / (4 * inches(ab));
 }
 
-/** Whether the lengths of placed corners are those they were placed from: used where a figure is changed by hand. */
-export function closes(corners: Corners): boolean {
-  return Object.values(lengthsOf(corners)).every(Number.isFinite) && isConvex(corners);
+function isOfFour(name: ReadingName): name is keyof Four {
+  return name !== "bc" && name !== "cd";
+}
+
+/** A change whose slab would cross itself or have a corner turned in is no explanation. */
+function closed(change: number, corners: Corners): { change: number; corners: Corners } | null {
+  return isConvex(corners) ? { change, corners } : null;
 }
