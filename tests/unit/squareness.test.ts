@@ -102,7 +102,7 @@ describe("four sides and two diagonals", () => {
         const shift = answer.rack.distance.in * (answer.rack.toward === "D" ? -1 : answer.rack.toward === "C" ? 1 : 0);
         const [first, second] = [between(A, [C[0] + shift, C[1]]), between(B, [D[0] + shift, D[1]])];
         expect(first).toBeCloseTo(second, 6);
-        expect(Math.abs(answer.target.diagonal.in - first)).toBeLessThan(0.02); // Ptolemy with both pairs unequal by up to 2 in
+        expect(answer.target.diagonal.in).toBeCloseTo(first, 6);
       }),
     );
   });

@@ -23,9 +23,8 @@ export interface Figure {
 }
 
 /**
- * Four sides: the braced quadrilateral, adjusted. CD slides along itself by (AC² − BD²)/(2(AB + xC − xD)), which makes the
- * diagonals equal; they then read √(AB·CD + BC·DA) (Ptolemy; exact when one pair of sides matches, else within the product of
- * the two tapers over twice the diagonal). Two sides: a parallelogram, slid by (AC² − BD²)/(4·AB).
+ * Four sides: the braced quadrilateral, adjusted; CD moved along AB's direction by (AC² − BD²)/(2(AB + xC − xD)) makes the
+ * diagonals equal. Two sides: a parallelogram, moved by (AC² − BD²)/(4·AB) onto the rectangle of the two sizes.
  *
  * @throws CalculationError `diagonal-impossible` at a diagonal that the sides cannot have, `sides-cross` when the six make no
  * convex slab.
@@ -58,13 +57,14 @@ function solveFour(measurements: Measurements): Figure {
   if (solved === null || corners === null || misclosure === null || Math.abs(misclosure.crossed) < Math.abs(misclosure.w) || !isConvex(corners)) {
     throw new CalculationError((["ac", "bd"] as const).map((name) => ({ pointer: `/diagonals/${name}`, code: "sides-cross", params: {} })));
   }
-  const { ab, bc, cd, da, ac, bd } = solved.adjusted;
+  const { ab, ac, bd } = solved.adjusted;
+  const slide = (ac * ac - bd * bd) / (2 * (ab + corners.C.x - corners.D.x));
   return {
     corners,
     closure: solved.closure,
     adjusted: solved.adjusted,
-    targetDiagonal: Math.sqrt(ab * cd + bc * da),
-    slide: (ac * ac - bd * bd) / (2 * (ab + corners.C.x - corners.D.x)),
+    targetDiagonal: Math.hypot(corners.C.x - slide, corners.C.y),
+    slide,
     closedBy: (name) => {
       const change = changeThatCloses(measured, name);
       return change === null ? null : closed(change, placeCorners({ ...measured, [name]: measured[name] + change }));
