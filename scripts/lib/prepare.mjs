@@ -7,6 +7,7 @@ import { loadEnvFile } from "./env-file.mjs";
 import { ensurePackages } from "./packages.mjs";
 import { choosePort } from "./ports.mjs";
 import { endLeftovers, own } from "./processes.mjs";
+import { recordRuns } from "./run.mjs";
 import { servicesNeeded } from "./services.mjs";
 import { root, settings } from "./settings.mjs";
 import { step } from "./steps.mjs";
@@ -30,6 +31,7 @@ export async function prepare(keep, { environment = process.env } = {}) {
   makeFolder(read.dataDir);
   const release = own(read.runDir, (pid) => `Sillwright already runs from this folder (process ${pid}): stop that one first, with Ctrl-C where it runs or kill ${pid}.`);
   keep({ stop: release });
+  recordRuns(read.runDir);
   await step("Leftovers", () => endLeftovers(read.runDir));
   // Asked early: nobody should wait for an installation to hear that the port is taken.
   if (read.port) await choosePort({ asked: read.port, host: read.host, variable: "PORT" });

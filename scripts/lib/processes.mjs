@@ -4,15 +4,23 @@ import path from "node:path";
 import { setTimeout as pause } from "node:timers/promises";
 import { Failure } from "./failure.mjs";
 
-/** When a process began, in the kernel's ticks since boot: with the pid it names one process and no later one. */
-function beginning(pid) {
+const bootId = () => readFileSync("/proc/sys/kernel/random/boot_id", "utf8").trim();
+
+/** What the kernel says of a process that is not a zombie: its group, and when it began in ticks since boot. */
+function kernelSays(pid) {
   try {
     const stat = readFileSync(`/proc/${pid}/stat`, "utf8");
     const fields = stat.slice(stat.lastIndexOf(")") + 2).split(" "); // the name before it may hold spaces
-    return fields[0] === "Z" ? undefined : `${readFileSync("/proc/sys/kernel/random/boot_id", "utf8").trim()} ${fields[19]}`;
+    return fields[0] === "Z" ? undefined : { group: Number(fields[2]), ticks: fields[19] };
   } catch {
     return undefined;
   }
+}
+
+/** When a process began: with the pid it names one process and no later one. */
+function beginning(pid) {
+  const said = kernelSays(pid);
+  return said && `${bootId()} ${said.ticks}`;
 }
 
 /** What identifies a process after we are gone; kept in a file under the data folder. */
@@ -21,25 +29,31 @@ export const identity = (pid, more = {}) => ({ pid, began: beginning(pid), ...mo
 /** Whether the process that was written down is still the one that runs under this pid. */
 export const isAlive = ({ pid, began }) => began !== undefined && beginning(pid) === began;
 
+/**
+ * Whether anything is left of the process and the group it led. When another process has its pid by now, the group was gone
+ * before; while members are left the kernel gives the pid to nobody.
+ */
+function isLeft(record) {
+  if (isAlive(record)) return true;
+  if (!record.began?.startsWith(bootId()) || kernelSays(record.pid)) return false;
+  return readdirSync("/proc").some((name) => /^\d+$/.test(name) && kernelSays(name)?.group === record.pid);
+}
+
 function signalGroup(pid, signal) {
   try {
     process.kill(-pid, signal);
   } catch {
-    try {
-      process.kill(pid, signal);
-    } catch {
-      // It has ended.
-    }
+    // It has ended.
   }
 }
 
-/** Asks the process to end, waits, and ends it by force when it has not. */
+/** Asks the process and what it started to end, waits, and ends them by force when they have not. */
 async function end(record, within) {
-  signalGroup(record.pid, "SIGTERM");
-  for (const until = Date.now() + within; isAlive(record) && Date.now() < until; ) await pause(20);
-  if (!isAlive(record)) return;
-  signalGroup(record.pid, "SIGKILL");
-  for (const until = Date.now() + 5_000; isAlive(record) && Date.now() < until; ) await pause(20);
+  for (const [signal, time] of [["SIGTERM", within], ["SIGKILL", 5_000]]) {
+    if (!isLeft(record)) return;
+    signalGroup(record.pid, signal);
+    for (const until = Date.now() + time; isLeft(record) && Date.now() < until; ) await pause(25);
+  }
 }
 
 const tail = (file, lines = 25) => {
@@ -105,7 +119,7 @@ export async function untilReady(service, ready, { seconds = 60, sentence } = {}
 export async function endLeftovers(runDir) {
   if (!existsSync(runDir)) return "nothing left from before";
   const names = readdirSync(runDir).filter((file) => file.endsWith(".json") && file !== "owner.json");
-  // The site goes first and the database last, as in a clean stop.
+  // Commands such as an installation go first, then the site, and the database last, as in a clean stop.
   const order = ["site", "bridge", "redis", "mariadb"];
   names.sort((a, b) => order.findIndex((name) => a.startsWith(name)) - order.findIndex((name) => b.startsWith(name)));
   const ended = [];
@@ -117,9 +131,9 @@ export async function endLeftovers(runDir) {
     } catch {
       record = { pid: 0, leftovers: [] }; // cut short by the kill
     }
-    if (isAlive(record)) {
-      await end(record, 20_000);
-      ended.push(file.slice(0, -5));
+    if (isLeft(record)) {
+      await end(record, file.startsWith("mariadb") ? 30_000 : 4_000);
+      ended.push(file.slice(0, -5).replace(/-\d+$/, ""));
     }
     for (const folder of record.leftovers ?? []) rmSync(folder, { recursive: true, force: true });
     rmSync(recordFile, { force: true });

@@ -1,5 +1,23 @@
 import { spawn } from "node:child_process";
+import { rmSync, writeFileSync } from "node:fs";
+import path from "node:path";
 import { Failure } from "./failure.mjs";
+import { identity } from "./processes.mjs";
+
+let records;
+
+/** Writes every command down in `folder` while it runs, so that the next start can end one that outlived a kill of this. */
+export function recordRuns(folder) {
+  records = folder;
+}
+
+/** @returns a function that strikes the command out again */
+function writeDown(command, pid) {
+  if (!records || !pid) return () => {};
+  const file = path.join(records, `${path.basename(command)}-${pid}.json`);
+  writeFileSync(file, JSON.stringify(identity(pid)));
+  return () => rmSync(file, { force: true });
+}
 
 /**
  * Runs a command to its end and answers its exit code and output. `show` prints the output as it comes.
@@ -8,6 +26,7 @@ import { Failure } from "./failure.mjs";
 export function run(command, args, { cwd, env = process.env, show = false, signal } = {}) {
   return new Promise((resolve, reject) => {
     const child = spawn(command, args, { cwd, env, stdio: ["ignore", "pipe", "pipe"], detached: true });
+    const strikeOut = writeDown(command, child.pid);
     const chunks = [];
     const keep = (stream) => (chunk) => {
       chunks.push(chunk);
@@ -25,10 +44,12 @@ export function run(command, args, { cwd, env = process.env, show = false, signa
     running.add(stop);
     signal?.addEventListener("abort", stop, { once: true });
     child.on("error", (error) => {
+      strikeOut();
       running.delete(stop);
       reject(error);
     });
     child.on("close", (code, killed) => {
+      strikeOut();
       running.delete(stop);
       signal?.removeEventListener("abort", stop);
       resolve({ code: code ?? 1, killed, output: Buffer.concat(chunks).toString("utf8") });

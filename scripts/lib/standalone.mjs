@@ -1,4 +1,5 @@
 import { cpSync, existsSync, readdirSync, renameSync, rmSync, mkdirSync } from "node:fs";
+import { get } from "node:http";
 import path from "node:path";
 import { startService, untilReady } from "./processes.mjs";
 
@@ -22,6 +23,18 @@ export function placeSite(root, folder, name) {
 /** Where a browser on this machine finds a site that listens on `host`. */
 export const addressOf = (host, port) => `http://${["127.0.0.1", "0.0.0.0", "::", "::1"].includes(host) ? "localhost" : host}:${port}`;
 
+/** Whether the site answers, over a connection that is closed at once: one left open would hold up the site's end. */
+function answers(url) {
+  return new Promise((resolve) => {
+    const request = get(url, { agent: false, timeout: 5_000 }, (response) => {
+      response.resume();
+      resolve(response.statusCode < 500);
+    });
+    request.once("timeout", () => request.destroy(new Error("no answer")));
+    request.once("error", () => resolve(false));
+  });
+}
+
 /** Starts the built site in its own process and waits until it answers. `environment` is added to what every site gets. */
 export async function startSite(options) {
   const { folder, host = "127.0.0.1", port, environment, keepAlive = "65000", runDir, logDir, name = "site" } = options;
@@ -37,11 +50,11 @@ export async function startSite(options) {
     },
     runDir,
     logDir,
-    within: 15_000,
+    within: 4_000, // far more than a request takes; a browser's idle connection may last longer, and need not be waited for
   });
   const reach = `http://${["0.0.0.0", "::"].includes(host) ? "127.0.0.1" : host.includes(":") ? `[${host}]` : host}:${port}/api/health/live`;
   try {
-    await untilReady(service, () => fetch(reach, { signal: AbortSignal.timeout(2_000) }).then(({ status }) => status < 500, () => false));
+    await untilReady(service, () => answers(reach));
   } catch (error) {
     await service.stop();
     throw error;

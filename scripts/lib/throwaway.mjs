@@ -2,6 +2,7 @@ import { mkdtempSync, readdirSync, rmSync } from "node:fs";
 import os from "node:os";
 import path from "node:path";
 import { endLeftovers, own } from "./processes.mjs";
+import { recordRuns } from "./run.mjs";
 import { startServices } from "./services.mjs";
 
 const PREFIX = "sillwright-test-";
@@ -27,6 +28,7 @@ export async function throwawayFolder(keep) {
   const dataDir = mkdtempSync(path.join(os.tmpdir(), PREFIX));
   const runDir = path.join(dataDir, "run");
   own(runDir, () => "in use");
+  recordRuns(runDir);
   keep({ stop: async () => rmSync(dataDir, { recursive: true, force: true }) });
   return { dataDir, runDir, logDir: path.join(dataDir, "log") };
 }
