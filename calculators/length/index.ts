@@ -4,4 +4,4 @@ export { characterLimit, parseLength, readLength } from "./parse-length";
 export { LengthReader } from "./length-reader";
 export { rangeLimit, ReadLength } from "./read-length";
 export { tokenizeLength } from "./length-tokens";
-export { graduation, isMetric, precisions, printExact, printLength, roundLength, roundTo, type Lean, type LengthStyle, type Precision } from "./print-length";
+export { graduation, isMetric, precisions, printExact, printLength, printRounded, roundLength, roundTo, type Lean, type LengthStyle, type Precision } from "./print-length";

@@ -33,7 +33,7 @@ const visible = /^[\p{L}\p{N}\p{P}\p{S}]$/u;
 
 export type CharacterKind = "space" | "digit" | "point" | "comma" | "dash" | "plus" | "slash" | "feet" | "inch" | "fraction" | "letter" | "other";
 
-export function kindOf(character: string): CharacterKind {
+function classify(character: string): CharacterKind {
   if (character >= "0" && character <= "9") return "digit";
   if (character === ".") return "point";
   if (character === ",") return "comma";
@@ -46,6 +46,13 @@ export function kindOf(character: string): CharacterKind {
   if (whiteSpace.test(character)) return "space";
   if (letter.test(character)) return "letter";
   return "other";
+}
+
+/** Most characters typed are of these, and looking them up is several times faster than asking every question again. */
+const plainKinds = Array.from({ length: 128 }, (_, code) => classify(String.fromCharCode(code)));
+
+export function kindOf(character: string): CharacterKind {
+  return plainKinds[character.charCodeAt(0)] ?? classify(character);
 }
 
 export function builtFraction(character: string): readonly [bigint, bigint] {

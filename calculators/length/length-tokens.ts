@@ -23,44 +23,40 @@ export interface TokenizedLength {
  * @throws LengthError `unexpected-text`, `sign`, or `two-readings` for a comma that may part thousands or decimals.
  */
 export function tokenizeLength(text: string): TokenizedLength {
-  const characters = Array.from(text);
   const tokens: LengthToken[] = [];
   let position = 0;
   let steps = 0;
   let ambiguous: LengthError | undefined;
 
+  /** The character here: two units long when it lies beyond the first plane. */
+  function characterHere(): string {
+    const code = text.charCodeAt(position);
+    return code < 0xd800 || code > 0xdbff ? text.charAt(position) : String.fromCodePoint(text.codePointAt(position)!);
+  }
+
   function kindHere() {
     steps += 1;
-    const character = characters[position];
-    return character === undefined ? "end" : kindOf(character);
+    return position < text.length ? kindOf(characterHere()) : "end";
   }
 
   function readNumber() {
     const start = position;
-    const groups: string[] = [""];
-    const separators: string[] = [];
+    let separators = "";
     for (let kind = kindHere(); kind === "digit" || kind === "point" || kind === "comma"; kind = kindHere()) {
-      const character = characters[position]!;
-      if (kind === "digit") groups[groups.length - 1] += character;
-      else {
-        separators.push(character);
-        groups.push("");
-      }
+      if (kind !== "digit") separators += text.charAt(position);
       position += 1;
     }
-    const [first, second] = numberReadings(groups, separators);
+    const [first, second] = numberReadings(text.slice(start, position), separators);
     tokens.push(first);
     if (second === undefined || ambiguous !== undefined) return;
-    const inPlace = (number: string) => [...characters.slice(0, start), number, ...characters.slice(position)].join("").trim();
+    const inPlace = (number: string) => (text.slice(0, start) + number + text.slice(position)).trim();
     ambiguous = new LengthError("two-readings", { first: inPlace(first.text), second: inPlace(second) });
   }
 
   function readWord() {
-    let word = "";
-    while (kindHere() === "letter") {
-      word += characters[position];
-      position += 1;
-    }
+    const start = position;
+    while (kindHere() === "letter") position += characterHere().length;
+    const word = text.slice(start, position);
     const unit = unitOf(word);
     if (unit === undefined) throw new LengthError("unexpected-text", { found: word });
     tokens.push({ kind: "unit", unit });
@@ -70,11 +66,11 @@ export function tokenizeLength(text: string): TokenizedLength {
   }
 
   for (let kind = kindHere(); kind !== "end"; kind = kindHere()) {
-    const character = characters[position]!;
     if (kind === "digit" || kind === "point" || kind === "comma") readNumber();
     else if (kind === "letter") readWord();
     else {
-      position += 1;
+      const character = characterHere();
+      position += character.length;
       if (kind === "fraction") tokens.push({ kind: "fraction", value: new Fraction(...builtFraction(character)) });
       else if (kind === "slash" || kind === "dash") tokens.push({ kind });
       else if (kind === "inch") tokens.push({ kind: "unit", unit: "in" });
@@ -96,13 +92,13 @@ type NumberToken = LengthToken & { kind: "number" };
  * Digits with their separators: `.` is the decimal point; `,` is one only where it cannot part thousands. Where it can be
  * either, the second reading comes along as text.
  */
-function numberReadings(groups: readonly string[], separators: readonly string[]): [NumberToken, string?] {
-  const written = groups.reduce((text, group, index) => text + separators[index - 1] + group);
+function numberReadings(written: string, separators: string): [NumberToken, string?] {
+  if (separators === "") return [{ kind: "number", value: new Fraction(BigInt(written)), whole: true, text: written }];
   const number = (text: string, whole: boolean): NumberToken => ({ kind: "number", value: new Fraction(text), whole, text });
   const unexpected = () => new LengthError("unexpected-text", { found: written });
+  const groups = written.split(/[.,]/);
   if (groups.every((group) => group === "")) throw unexpected();
   const [head = "", ...rest] = groups;
-  if (separators.length === 0) return [number(head, true)];
 
   const partsThousands = head.length >= 1 && head.length <= 3 && !head.startsWith("0");
   if (separators.length === 1) {
@@ -118,7 +114,7 @@ function numberReadings(groups: readonly string[], separators: readonly string[]
   const decimals = separators.at(-1) === "." ? (rest.at(-1) ?? "") : null;
   const thousands = decimals === null ? rest : rest.slice(0, -1);
   const commas = decimals === null ? separators : separators.slice(0, -1);
-  const grouped = partsThousands && commas.every((mark) => mark === ",") && thousands.every((group) => group.length === 3);
+  const grouped = partsThousands && !commas.includes(".") && thousands.every((group) => group.length === 3);
   if (!grouped) throw unexpected();
   return [number(head + thousands.join("") + (decimals === null ? "" : `.${decimals || "0"}`), decimals === null)];
 }

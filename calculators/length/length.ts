@@ -14,6 +14,7 @@ export const lengthUnits = ["in", "ft", "mm", "cm", "m"] as const satisfies read
 
 /** Digits of a plain decimal, never an exponent, so that a JSON number means what was written. */
 function exactDecimal(value: number): Fraction {
+  if (Number.isSafeInteger(value)) return new Fraction(BigInt(value));
   if (!Number.isFinite(value)) throw new RangeError("A length needs a finite number");
   const [digits = "0", exponent] = String(value).split("e");
   const mantissa = new Fraction(digits);

@@ -76,7 +76,11 @@ function evenRound(value: number): number {
  * @example 687/2 in at 1/16 prints `28' 7 1/2"`, or `343 1/2"` in the style `inches`; at 0.5mm `8725 mm`.
  */
 export function printLength(value: Length | number, precision: Precision, style: LengthStyle = "feet-inches"): string {
-  const { rounded } = roundLength(value, precision);
+  return printRounded(roundLength(value, precision).rounded, precision, style);
+}
+
+/** A length that `roundLength` has rounded to this precision. */
+export function printRounded(rounded: Length, precision: Precision, style: LengthStyle = "feet-inches"): string {
   const sign = rounded.isNegative() ? "-" : "";
   const size = rounded.magnitude();
   return sign + (isMetric(precision) ? `${size.in("mm").toString()} mm` : printInches(size, style));

@@ -113,13 +113,16 @@ export function calculatorInput<Shape extends z.ZodRawShape>(shape: Shape, missi
       },
       { when: () => true },
     )
-    .transform((value) => mapLengths(value, [], (read) => read.in(unitOf(value))) as Settled<typeof value>);
+    .transform((value) => {
+      const unit = unitOf(value);
+      return mapLengths(value, [], (read) => read.in(unit)) as Settled<typeof value>;
+    });
 }
 
 /** The unit asked for, or inches while that field itself is at fault. */
 function unitOf(value: unknown): LengthUnit {
-  const unit = commonFields.unit.safeParse((value as { unit?: unknown } | null)?.unit);
-  return unit.success ? unit.data : "in";
+  const asked = (value as { unit?: unknown } | null)?.unit;
+  return lengthUnits.find((unit) => unit === asked) ?? "in";
 }
 
 function mapLengths(part: unknown, path: PropertyKey[], settle: (read: ReadLength, path: PropertyKey[]) => Length): unknown {

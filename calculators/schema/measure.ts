@@ -1,5 +1,5 @@
 import { z } from "zod";
-import { type Length, printLength, roundLength, type LengthStyle, type Precision } from "../length";
+import { type Length, printRounded, roundLength, type LengthStyle, type Precision } from "../length";
 
 /** How every length is answered. `in`, `mm` and `exact` are unrounded; `text` is rounded to the precision asked for. */
 export const lengthAnswer = z
@@ -16,8 +16,8 @@ export type LengthAnswer = z.output<typeof lengthAnswer>;
 
 /** The answer form of a length: an exact `Length`, or a double of inches where the length is irrational or adjusted. */
 export function measure(value: Length | number, precision: Precision, style?: LengthStyle): LengthAnswer {
-  const text = printLength(value, precision, style);
-  const { lean } = roundLength(value, precision);
+  const { rounded, lean } = roundLength(value, precision);
+  const text = printRounded(rounded, precision, style);
   if (typeof value === "number") return { in: value, exact: null, text, mm: value * 25.4, lean };
   return { in: value.toNumber(), exact: value.toString(), text, mm: value.toNumber("mm"), lean };
 }
