@@ -119,9 +119,11 @@ export function squareRoot(squareInches: Fraction): Length | number {
   return Math.sqrt(toDouble(squareInches));
 }
 
+const doubleLimit = 1n << 1000n;
+
 /** A sum of many unlike fractions outgrows the doubles above and below the line long before it does as a whole. */
 function toDouble(value: Fraction): number {
-  return Math.max(bitsOf(value.n), bitsOf(value.d)) < 1000 ? value.valueOf() : (Number(value.s) * Number((value.n << 64n) / value.d)) / 2 ** 64;
+  return value.n < doubleLimit && value.d < doubleLimit ? value.valueOf() : (Number(value.s) * Number((value.n << 64n) / value.d)) / 2 ** 64;
 }
 
 function bitsOf(value: bigint): number {
