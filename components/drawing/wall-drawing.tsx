@@ -2,7 +2,8 @@
 
 import { Fragment, useId, type ReactNode } from "react";
 import { useTranslate } from "@/lib/client/i18n/messages-context";
-import { plateHeight, wallRows, type PlacedBolt, type WallBolt, type WallPiece } from "./wall-geometry";
+import { pixel } from "./plan-geometry";
+import { plateHeight, wallRows, type PlacedBolt, type WallBolt, type WallGap, type WallPiece } from "./wall-geometry";
 
 export interface WallDrawingProps {
   /** Plate pieces in order along the wall. */
@@ -14,6 +15,8 @@ export interface WallDrawingProps {
   inset?: number;
   /** The band in which a bolt's centre must stand. */
   middleThird?: boolean;
+  /** Distances that break a rule, drawn under the plate from bolt to bolt with their words. */
+  gaps?: readonly WallGap[];
   /** What the drawing shows, in one sentence. */
   description: string;
   title?: string;
@@ -23,14 +26,15 @@ export interface WallDrawingProps {
 const box = 390;
 const labelRoom = 42;
 const underRoom = 34;
+const gapRoom = 26;
 
 /** A wall's plates from above, outer edge down, each piece a row: timber, bolts, the middle third, and the slab edge beyond. */
-export function WallDrawing({ pieces, bolts, plateWidth, inset, middleThird = false, description, title, caption }: WallDrawingProps) {
+export function WallDrawing({ pieces, bolts, plateWidth, inset, middleThird = false, gaps = [], description, title, caption }: WallDrawingProps) {
   const t = useTranslate();
   const id = useId();
   if (pieces.length === 0) return null;
-  const { rows, acrossTimes, acrossPerInch } = wallRows({ pieces, bolts, plateWidth, box });
-  const rowHeight = labelRoom + plateHeight + underRoom;
+  const { rows, perInch, acrossTimes, acrossPerInch } = wallRows({ pieces, bolts, plateWidth, box });
+  const rowHeight = labelRoom + plateHeight + underRoom + (gaps.length > 0 ? gapRoom : 0);
   const edge = inset === undefined ? null : Math.max(-plateHeight / 2, Math.min(18, inset * acrossPerInch));
   return (
     <figure>
@@ -61,6 +65,11 @@ export function WallDrawing({ pieces, bolts, plateWidth, inset, middleThird = fa
                 )}
               </Fragment>
             ))}
+            {gaps
+              .filter(({ from }) => from >= piece.from && from < piece.to)
+              .map((gap) => (
+                <GapMark key={gap.from} gap={gap} left={left - piece.from * perInch} perInch={perInch} end={left + width} />
+              ))}
             {piece.label === undefined ? null : (
               <text x="4" y={plateHeight + 28} className="small disp">
                 {piece.label}
@@ -71,6 +80,19 @@ export function WallDrawing({ pieces, bolts, plateWidth, inset, middleThird = fa
       </svg>
       <figcaption className="plan-caption">{caption ?? t("common.drawing.across", { times: acrossTimes })}</figcaption>
     </figure>
+  );
+}
+
+/** A dimension in keel red; one that runs on to the next piece ends with this one's row. */
+function GapMark({ gap: { from, to, label }, left, perInch, end }: { gap: WallGap; left: number; perInch: number; end: number }) {
+  const [x1, x2, y] = [pixel(left + from * perInch), pixel(Math.min(end, left + to * perInch)), plateHeight + 40];
+  return (
+    <g>
+      <path d={`M${x1} ${y - 5}v10M${x1} ${y}H${x2}M${x2} ${y - 5}v10`} fill="none" stroke="var(--keel)" strokeWidth="2" />
+      <text x={pixel((x1 + x2) / 2)} y={y + 18} textAnchor="middle" className="num small out">
+        {label}
+      </text>
+    </g>
   );
 }
 

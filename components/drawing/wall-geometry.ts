@@ -19,6 +19,12 @@ export interface WallBolt {
   tone?: BoltTone;
 }
 
+export interface WallGap {
+  from: number;
+  to: number;
+  label: string;
+}
+
 /** `bad` broke a rule, `added` is drilled in later, `engineered` is never moved or counted. Each has its own shape. */
 export type BoltTone = "good" | "bad" | "added" | "engineered";
 

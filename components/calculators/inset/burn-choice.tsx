@@ -4,6 +4,8 @@ import { Segmented } from "@/components/ui/segmented";
 import type { LengthUnit } from "@/calculators/length";
 import { useTranslate } from "@/lib/client/i18n/messages-context";
 
+const names: Readonly<Record<string, string>> = { "0": "end", "1 in": "oneInch", "1 ft": "oneFoot", "100 mm": "hundred" };
+
 /** Where the tape was held. A burn that came by an address and is none of these stands beside them. */
 export function BurnChoice({ value, onChange, unit }: { value: string; onChange: (value: string) => void; unit: LengthUnit }) {
   const t = useTranslate();
@@ -18,7 +20,7 @@ export function BurnChoice({ value, onChange, unit }: { value: string; onChange:
         hint={t("inset.burn.hint")}
         value={current}
         onChange={(burn) => onChange(burn === "0" ? "" : burn)}
-        options={options.map((burn) => ({ value: burn, label: burn === "0" ? t("inset.burn.end") : t("inset.burn.mark", { mark: burn }) }))}
+        options={options.map((burn) => ({ value: burn, label: names[burn] === undefined ? burn : t(`inset.burn.${names[burn]}`) }))}
       />
     </div>
   );

@@ -41,7 +41,7 @@ export function InsetResults({ answer, burned }: { answer: InsetAnswer; burned: 
               : (["ac", "bd"] as const).map((name) => ({ key: `${name}-measured`, label: t("inset.results.measured", { diagonal: name }), value: <LengthAnswer length={measured[name].measured} /> }))),
           ]}
         />
-        <Note title={t("inset.proves.title")}>{t(check === null ? "inset.proves.drop" : "inset.proves.check")}</Note>
+        <Note title={t("inset.proves.title")}>{t(`inset.proves.${check === null ? "drop" : check.agrees ? "check" : "off"}`)}</Note>
       </div>
       <section aria-labelledby="offsets-title">
         <h2 id="offsets-title">{t("inset.offsets.title")}</h2>
