@@ -15,8 +15,10 @@ export interface BracedNetwork {
   corners: number;
   points: NetworkPoint[];
   observations: Observation[];
-  /** As read less burn. */
-  measured: Length[];
+  /** As read less burn; null while not pulled. */
+  measured: (Length | null)[];
+  /** For each observation, the number of its reading. */
+  numbers: number[];
 }
 
 interface Named {
@@ -47,19 +49,21 @@ export function bracedNetwork({ readings = [], burn, burns = {}, readingError, p
   const at = (point: Named) => points.findIndex(({ corner, middle }) => (point.second === null ? !middle && corner === point.corner : middle && corner === point.corner));
   const burnByPair = new Map(Object.entries(burns).map(([pair, length]) => [pair.toLowerCase(), length]));
   const measured = readings.map(({ reading, from, to }, index) => {
+    if (reading === undefined) return null;
     const [first, second] = [from, to].map((name) => name.trim().toLowerCase()) as [string, string];
     const held = burnByPair.get(first + second) ?? burnByPair.get(second + first) ?? burn ?? Length.zero;
     const actual = reading.minus(held);
     if (!actual.isPositive()) issues.push({ pointer: `/readings/${index}/reading`, code: "burn-over-reading", params: { burn: measure(held, precision).text } });
     return actual;
   });
-  const observations = ends.map(([from, to], index) => ({ from: at(from), to: at(to), length: measured[index]!.toNumber() }));
-  observations.forEach(({ from, to }, index) => {
-    if (from === to) issues.push({ pointer: `/readings/${index}/to`, code: "same-point", params: { point: points[from]?.name ?? "" } });
+  const numbers = measured.flatMap((length, index) => (length === null ? [] : [index]));
+  const observations = numbers.map((index) => ({ from: at(ends[index]![0]), to: at(ends[index]![1]), length: measured[index]!.toNumber() }));
+  ends.forEach(([from, to], index) => {
+    if (at(from) === at(to)) issues.push({ pointer: `/readings/${index}/to`, code: "same-point", params: { point: points[at(from)]?.name ?? "" } });
   });
-  if (issues.length === 0) issues.push(...tooLong(points.length, observations, 3 * (readingError?.toNumber() ?? 0.125), precision));
+  if (issues.length === 0) issues.push(...tooLong(points.length, observations, numbers, 3 * (readingError?.toNumber() ?? 0.125), precision));
   if (issues.length > 0) throw new CalculationError(issues);
-  return { corners, points, observations, measured };
+  return { corners, points, observations, measured, numbers };
 }
 
 function pointNamed(text: string): Named | null {
@@ -92,7 +96,7 @@ function pointsInOrder(named: readonly Named[], corners: number): NetworkPoint[]
 }
 
 /** No length can exceed the way round by others: the shortest ways between all points (Bellman and Ford). */
-function tooLong(count: number, observations: readonly Observation[], slack: number, precision: FootprintInput["precision"]): Issue[] {
+function tooLong(count: number, observations: readonly Observation[], numbers: readonly number[], slack: number, precision: FootprintInput["precision"]): Issue[] {
   return observations.flatMap(({ from, to, length }, index) => {
     const way = Array.from({ length: count }, (_, point) => (point === from ? 0 : Infinity));
     const others = observations.filter((_, other) => other !== index);
@@ -103,6 +107,6 @@ function tooLong(count: number, observations: readonly Observation[], slack: num
       }
     }
     const most = way[to]!;
-    return length > most + slack ? [{ pointer: `/readings/${index}/reading`, code: "longer-than-others", params: { most: measure(most, precision).text } }] : [];
+    return length > most + slack ? [{ pointer: `/readings/${numbers[index]}/reading`, code: "longer-than-others", params: { most: measure(most, precision).text } }] : [];
   });
 }

@@ -123,18 +123,18 @@ function adjustmentOf(input: FootprintInput, network: BracedNetwork, adjusted: A
     closureIn: closure,
     limitIn: limit,
     contradictory,
-    readings: ends.map((pair, index) => {
+    readings: network.numbers.map((number, index) => {
       const residual = residuals[index] ?? null;
-      const measured = network.measured[index]!;
-      return { ...pair, measured: measure(measured, input.precision), adjusted: residual === null ? null : measure(measured.toNumber() + residual, input.precision), residualIn: residual };
+      const measured = network.measured[number]!;
+      return { ...ends[number]!, measured: measure(measured, input.precision), adjusted: residual === null ? null : measure(measured.toNumber() + residual, input.precision), residualIn: residual };
     }),
     suspects: !contradictory
       ? []
-      : ends.flatMap((pair, index) => {
+      : network.numbers.flatMap((number, index) => {
           const residual = residuals[index] ?? null;
           const change = residual === null ? null : changeAlone(residual, redundancy[index] ?? 0);
           if (residual === null || change === null || Math.sqrt(Math.max(0, closure ** 2 - residual * change)) > limit) return [];
-          return [{ ...pair, changeIn: change, likely: near(change, burn) ? ("burn" as const) : near(change, 12) ? ("foot" as const) : null }];
+          return [{ ...ends[number]!, changeIn: change, likely: near(change, burn) ? ("burn" as const) : near(change, 12) ? ("foot" as const) : null }];
         }),
     otherShapes: adjusted.otherShapes.map((inside) => inside.map(cornerName)),
   };

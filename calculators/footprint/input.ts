@@ -41,7 +41,7 @@ export const footprintInput = calculatorInput({
     .optional()
     .meta({ description: `The same as text, legs parted by commas or lines; at most ${walkCharacterLimit} characters`, examples: ["E 40 ft, N 20 ft, W 16 ft, N 12 ft, W 24 ft, S 32 ft"] }),
   readings: z
-    .array(z.strictObject({ from: pointField, to: pointField, reading: lengthField({ description: "What the tape showed, burn included", example: "44' 8 11/16\"" }) }))
+    .array(z.strictObject({ from: pointField, to: pointField, reading: lengthField({ description: "What the tape showed, burn included; left out while it has not been pulled", example: "44' 8 11/16\"" }).optional() }))
     .max(mostReadings)
     .optional()
     .meta({ description: "Sides and diagonals of a braced polygon, at least 2n − 3 of them for n corners" }),

@@ -11,7 +11,7 @@ export function perSide(options: Options) {
   const raw = z.union([z.string(), z.number()]);
   return z
     .union([raw, z.record(z.string(), raw)], { error: (issue) => (issue.input === undefined ? "required" : "expected-length") })
-    .meta({ description: `${options.description}: one for all sides, or one each by name (ab, bc …)`, examples: [options.example] })
+    .meta({ description: `${options.description}: one for all sides, or one each by name (ab, bc …), with \`other\` for those not named`, examples: [options.example] })
     .transform((given, context) => {
       const read = (value: unknown, path: string[]) => {
         const result = one.safeParse(value);
@@ -32,12 +32,12 @@ export function perSide(options: Options) {
 export function forSides(value: Length | Readonly<Record<string, Length>>, count: number, pointer: string): Length[] {
   const names = sideNames(count);
   if (value instanceof Length) return names.map(() => value);
-  const unknown = Object.keys(value).filter((name) => !names.includes(name.toLowerCase()));
+  const unknown = Object.keys(value).filter((name) => name !== "other" && !names.includes(name.toLowerCase()));
   const bySide = new Map(Object.entries(value).map(([name, length]) => [name.toLowerCase(), length]));
   const issues: Issue[] = [
     ...unknown.map((name) => ({ pointer: `${pointer}/${name}`, code: "side-unknown", params: { found: name.slice(0, 8), first: names[0]!, last: names.at(-1)! } })),
-    ...names.filter((name) => !bySide.has(name)).map((name) => ({ pointer: `${pointer}/${name}`, code: "required", params: {} })),
+    ...names.filter((name) => value.other === undefined && !bySide.has(name)).map((name) => ({ pointer: `${pointer}/${name}`, code: "required", params: {} })),
   ];
   if (issues.length > 0) throw new CalculationError(issues);
-  return names.map((name) => bySide.get(name)!);
+  return names.map((name) => (bySide.get(name) ?? value.other)!);
 }
