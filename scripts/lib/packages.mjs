@@ -2,7 +2,7 @@ import { createHash } from "node:crypto";
 import { existsSync, readFileSync, writeFileSync } from "node:fs";
 import path from "node:path";
 import { diskFull, Failure } from "./failure.mjs";
-import { run } from "./run.mjs";
+import { NOT_FOUND, run } from "./run.mjs";
 
 const readJson = (file) => JSON.parse(readFileSync(file, "utf8"));
 
@@ -29,10 +29,8 @@ export async function ensurePackages(root, { execute = run } = {}) {
   if (packagesCurrent(root)) return "already here";
   // Playwright must not fetch a browser of its own: the tests use the distribution's Chromium.
   const env = { ...process.env, PLAYWRIGHT_SKIP_BROWSER_DOWNLOAD: "1", NODE_ENV: "development" };
-  const { code, output } = await execute("npm", ["ci", "--no-audit", "--no-fund"], { cwd: root, env }).catch((error) => {
-    if (error.code === "ENOENT") throw new Failure("npm is not on this machine: install it with Node (nodejs.org) and start again.");
-    throw error;
-  });
+  const { code, output } = await execute("npm", ["ci", "--no-audit", "--no-fund"], { cwd: root, env });
+  if (code === NOT_FOUND) throw new Failure("npm is not on this machine: install it with Node (nodejs.org) and start again.");
   if (code !== 0) throw packagesFailure(output, root);
   packagesCurrent(root);
   return "installed";

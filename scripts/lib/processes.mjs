@@ -24,7 +24,7 @@ function beginning(pid) {
 }
 
 /** What identifies a process after we are gone; kept in a file under the data folder. */
-export const identity = (pid, more = {}) => ({ pid, began: beginning(pid), ...more });
+export const identity = (pid) => ({ pid, began: beginning(pid) });
 
 /** Whether the process that was written down is still the one that runs under this pid. */
 export const isAlive = ({ pid, began }) => began !== undefined && beginning(pid) === began;
@@ -64,9 +64,24 @@ const tail = (file, lines = 25) => {
   }
 };
 
+const WRITE_DOWN = `
+read -r stat < /proc/$$/stat
+read -r boot < /proc/sys/kernel/random/boot_id
+began() { shift 19; printf '%s %s' "$boot" "$1"; }
+printf '{"pid":%s,"began":"%s","leftovers":%s}' "$$" "$(began \${stat##*) })" "$2" > "$1.new" && mv "$1.new" "$1"
+shift 2
+exec "$@"`;
+
+/**
+ * A command that writes itself down before it becomes the program: were we to do it, a kill between the start and the writing
+ * would leave a program nobody knows of.
+ */
+export const writingItselfDown = (recordFile, leftovers, command, args) => ["/bin/sh", ["-c", WRITE_DOWN, "sh", recordFile, JSON.stringify(leftovers), command, ...args]];
+
 /**
  * Starts a long-running program with a log file and a record of its pid, in a session of its own: a Ctrl-C meant for us does not
  * reach it, so that we can end the site before its database.
+ * @param {{ name: string, command: string, args: string[], env?: NodeJS.ProcessEnv, cwd?: string, runDir: string, logDir: string, within?: number, leftovers?: string[] }} what
  */
 export function startService({ name, command, args, env = process.env, cwd, runDir, logDir, within = 10_000, leftovers = [] }) {
   mkdirSync(runDir, { recursive: true });
@@ -74,13 +89,11 @@ export function startService({ name, command, args, env = process.env, cwd, runD
   const logFile = path.join(logDir, `${name}.log`);
   const tooLong = existsSync(logFile) && statSync(logFile).size > 5_000_000;
   const log = openSync(logFile, tooLong ? "w" : "a", 0o600);
-  const child = spawn(command, args, { cwd, env, detached: true, stdio: ["ignore", log, log] });
-  closeSync(log);
   const recordFile = path.join(runDir, `${name}.json`);
-  const record = identity(child.pid ?? 0, { leftovers });
-  if (child.pid) writeFileSync(recordFile, JSON.stringify(record));
-  const service = { name, pid: child.pid, logFile, ended: false, stopping: false, tail: () => tail(logFile) };
-  service.exited = new Promise((resolve) => {
+  const child = spawn(...writingItselfDown(recordFile, leftovers, command, args), { cwd, env, detached: true, stdio: ["ignore", log, log] });
+  closeSync(log);
+  const record = identity(child.pid ?? 0);
+  const exited = new Promise((resolve) => {
     const done = (reason) => {
       service.ended = true;
       rmSync(recordFile, { force: true });
@@ -89,14 +102,15 @@ export function startService({ name, command, args, env = process.env, cwd, runD
     child.once("error", (error) => done(error.message));
     child.once("exit", (code, signal) => done(signal ? `signal ${signal}` : `code ${code}`));
   });
-  service.stop = async () => {
+  const stop = async () => {
     service.stopping = true;
     if (!service.ended) {
       await end(record, within);
-      await service.exited;
+      await exited;
     }
     for (const folder of leftovers) rmSync(folder, { recursive: true, force: true });
   };
+  const service = { name, pid: child.pid, logFile, ended: false, stopping: false, tail: () => tail(logFile), exited, stop };
   return service;
 }
 

@@ -1,23 +1,19 @@
 import { spawn } from "node:child_process";
-import { rmSync, writeFileSync } from "node:fs";
+import { rmSync } from "node:fs";
 import path from "node:path";
 import { Failure } from "./failure.mjs";
-import { identity } from "./processes.mjs";
+import { writingItselfDown } from "./processes.mjs";
 
 let records;
+let commands = 0;
 
 /** Writes every command down in `folder` while it runs, so that the next start can end one that outlived a kill of this. */
 export function recordRuns(folder) {
   records = folder;
 }
 
-/** @returns a function that strikes the command out again */
-function writeDown(command, pid) {
-  if (!records || !pid) return () => {};
-  const file = path.join(records, `${path.basename(command)}-${pid}.json`);
-  writeFileSync(file, JSON.stringify(identity(pid)));
-  return () => rmSync(file, { force: true });
-}
+/** The exit code for a program that is not there, as a shell gives it. */
+export const NOT_FOUND = 127;
 
 /**
  * Runs a command to its end and answers its exit code and output. `show` prints the output as it comes.
@@ -25,8 +21,10 @@ function writeDown(command, pid) {
  */
 export function run(command, args, { cwd, env = process.env, show = false, signal } = {}) {
   return new Promise((resolve, reject) => {
-    const child = spawn(command, args, { cwd, env, stdio: ["ignore", "pipe", "pipe"], detached: true });
-    const strikeOut = writeDown(command, child.pid);
+    const recordFile = records && path.join(records, `${path.basename(command)}-${(commands += 1)}.json`);
+    const what = recordFile ? writingItselfDown(recordFile, [], command, args) : [command, args];
+    const child = spawn(...what, { cwd, env, stdio: ["ignore", "pipe", "pipe"], detached: true });
+    const strikeOut = () => recordFile && rmSync(recordFile, { force: true });
     const chunks = [];
     const keep = (stream) => (chunk) => {
       chunks.push(chunk);
@@ -46,7 +44,8 @@ export function run(command, args, { cwd, env = process.env, show = false, signa
     child.on("error", (error) => {
       strikeOut();
       running.delete(stop);
-      reject(error);
+      if (error.code === "ENOENT") resolve({ code: NOT_FOUND, killed: null, output: error.message });
+      else reject(error);
     });
     child.on("close", (code, killed) => {
       strikeOut();

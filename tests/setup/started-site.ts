@@ -3,12 +3,20 @@ import { existsSync, mkdtempSync, readdirSync, readFileSync, rmSync } from "node
 import os from "node:os";
 import path from "node:path";
 import { setTimeout as pause } from "node:timers/promises";
-import { freePort } from "@/scripts/lib/ports.mjs";
+import { isFree } from "@/scripts/lib/ports.mjs";
+
+/** A port below those the system lends to outgoing connections, which may take one between two starts. */
+async function quietPort(): Promise<number> {
+  for (;;) {
+    const port = 20_000 + Math.floor(Math.random() * 12_000);
+    if (await isFree(port)) return port;
+  }
+}
 
 /** A data folder for one `npm start`, with the ports it is told to use. */
 export async function startFolder() {
   const dataDir = mkdtempSync(path.join(os.tmpdir(), "sillwright-start-"));
-  return { dataDir, port: await freePort(), mariadbPort: await freePort() };
+  return { dataDir, port: await quietPort(), mariadbPort: await quietPort() };
 }
 export type StartFolder = Awaited<ReturnType<typeof startFolder>>;
 

@@ -63,7 +63,7 @@ describe("an unfit machine is told in one sentence what to do", () => {
     writeFileSync(path.join(folder, "package-lock.json"), '{"packages":{}}');
     await expect(ensurePackages(folder, { execute: answers("npm error code ENOTFOUND\nnpm error network request failed") })).rejects.toThrow(/^The npm registry cannot be reached: connect/);
     await expect(ensurePackages(folder, { execute: answers("npm error code EACCES") })).rejects.toThrow(/node_modules: make that folder yours/);
-    await expect(ensurePackages(folder, { execute: async () => Promise.reject(Object.assign(new Error("spawn"), { code: "ENOENT" })) })).rejects.toThrow(/^npm is not on this machine/);
+    await expect(ensurePackages(folder, { execute: answers("sh: 1: exec: npm: not found", 127) })).rejects.toThrow(/^npm is not on this machine/);
   });
 
   test("a port that is taken, a port that is none, an address of another machine", async () => {
