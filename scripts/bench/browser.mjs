@@ -13,4 +13,4 @@ export const phone = { ...devices["Pixel 7"], viewport: { width: 390, height: 84
 export const pagesOf = (examples) => [...new Map(examples.map((example) => [example.calculator, example])).values()];
 
 /** The answer stands: the verdict is no longer waiting. */
-export const untilAnswered = (page) => page.waitForFunction(() => document.querySelector(".verdict")?.getAttribute("data-tone") !== "idle", undefined, { timeout: 20_000 });
+export const untilAnswered = (page) => page.locator('.verdict:not([data-tone="idle"])').waitFor({ timeout: 20_000 });
