@@ -3,6 +3,7 @@ import { lengthAnswer } from "../schema";
 
 export const cornerAnswer = z
   .strictObject({
+    legs: z.strictObject({ first: lengthAnswer, second: lengthAnswer }).meta({ description: "The legs as they were understood" }),
     diagonal: lengthAnswer.meta({ description: "Between the ends of the legs when the corner is square" }),
     reading: lengthAnswer.meta({ description: "The same as the tape will show it, burn included" }),
     swingIn: z.number().meta({ description: "How far the second leg's end swings, in inches, when that reading is one graduation off" }),

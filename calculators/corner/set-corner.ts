@@ -27,6 +27,7 @@ export function setCorner({ legs, burn = Length.zero, unit, precision }: CornerI
   const counted = (leg: Length) => Number(leg.inches.div(whole.inches).floor());
   const found = largestTriangle({ along: counted(first), up: counted(second) });
   return {
+    legs: { first: show(first), second: show(second) },
     diagonal: show(diagonal),
     reading: show(typeof diagonal === "number" ? diagonal + burn.toNumber() : diagonal.plus(burn)),
     swingIn: (inches(diagonal) * step) / first.toNumber(),

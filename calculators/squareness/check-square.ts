@@ -26,7 +26,7 @@ const same = 1e-9;
  * and five unknowns, equal weights (`adjustQuadrilateral`). Two sides are checked by √((AC² + BD²)/2) against √(AB² + DA²).
  *
  * @throws CalculationError `sides-and-sizes`, `burn-over-reading`, `diagonal-impossible`, `sides-cross`, `tape-impossible`.
- * @example 28 by 24 ft with diagonals 443 5/16 and 441 13/16: CD is racked 0.988 in toward C (domain.md S07): the worked
+ * @example 28 by 24 ft with diagonals 443 5/16 and 441 13/16: CD is racked 0.988 in and goes back toward D (domain.md S07): the worked
  * example `racked`, which a test runs.
  */
 export function checkSquare(input: SquarenessInput): SquarenessAnswer {

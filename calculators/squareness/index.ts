@@ -17,8 +17,8 @@ export const squarenessOperation = defineOperation({
     {
       id: "racked",
       input: { length: "28' 0\"", width: "24' 0\"", diagonals: { ac: "444 5/16", bd: "442 13/16" }, burn: "1 in", tolerance: "triangle-12-16-20" },
-      answer: { shape: "racked", verdict: "within", difference: { text: '1 1/2"' }, rack: { distance: { text: '1 1/8"' }, toward: "D" } },
-      source: "domain.md S07: 1.5 in over 28 by 24 ft is 1.152 in over the 24 ft sides' length",
+      answer: { shape: "racked", verdict: "within", difference: { text: '1 1/2"' }, rack: { distance: { text: '1"', lean: "scant" }, toward: "D" } },
+      source: "domain.md S07: 1.5 in on 24 by 28 ft is 0.988 in over 24 ft, inside the 1.9 in of section 2.2",
     },
     {
       id: "trapezoid",
