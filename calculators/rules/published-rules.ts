@@ -55,7 +55,7 @@ const ircSeismic: RuleText = {
   ...irc,
   id: "us-irc-seismic",
   title: "IRC R403.1.6.1, one and two storeys",
-  spacing: { value: "6 ft", ...from("R403.1.6.1 with R403.1.6", irc2024, "derived") },
+  spacing: { value: "6 ft", ...from("R403.1.6.1, R403.1.6", irc2024, "derived") },
   washer: { size: "3 in", thickness: "0.229 in", slotLength: "1 3/4 in", slotOver: "3/16 in", ...from("R602.11.1", washerQuote, "second-hand") },
 };
 

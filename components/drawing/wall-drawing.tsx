@@ -101,7 +101,7 @@ function BoltLabel({ bolt }: { bolt: PlacedBolt }) {
   return (
     <>
       {bolt.line === 1 ? <line x1={bolt.x} x2={bolt.x} y1="-20" y2="0" stroke="var(--edge)" strokeWidth="1" /> : null}
-      <text x={bolt.x} y={y} textAnchor="middle" className={bolt.tone === "bad" ? "num small halo out" : "num small halo"}>
+      <text x={bolt.labelX} y={y} textAnchor="middle" className={bolt.tone === "bad" ? "num small halo out" : "num small halo"}>
         {bolt.label}
       </text>
     </>

@@ -33,6 +33,8 @@ export interface PlacedBolt extends WallBolt {
   y: number;
   /** 0 for the line of labels next to the plate, 1 for the one above it. */
   line: number;
+  /** Where the label's middle stands, so that it stays inside the drawing. */
+  labelX: number;
 }
 
 export interface PieceRow {
@@ -59,9 +61,9 @@ export function wallRows({ pieces, bolts, plateWidth, box }: { pieces: readonly 
     const along = (bolt.station - row.piece.from) * perInch;
     const x = pixel(sideMargin + Math.min(row.width + sideMargin - 8, Math.max(8 - sideMargin, along)));
     const y = pixel(plateHeight - (bolt.across ?? plateWidth / 2) * acrossPerInch);
-    row.bolts.push({ ...bolt, x, y: Math.min(plateHeight + 14, Math.max(-14, y)), line: 0 });
+    row.bolts.push({ ...bolt, x, y: Math.min(plateHeight + 14, Math.max(-14, y)), line: 0, labelX: x });
   }
-  for (const row of rows) stagger(row.bolts);
+  for (const row of rows) stagger(row.bolts, box);
   return { rows, perInch, acrossTimes: Math.max(1, Math.round(acrossPerInch / perInch)), acrossPerInch };
 }
 
@@ -69,12 +71,13 @@ function distanceTo({ from, to }: WallPiece, station: number): number {
   return Math.max(0, from - station, station - to);
 }
 
-/** Figures stand 8.5 px wide at their size: a label that would touch its neighbour goes one line up. */
-function stagger(bolts: PlacedBolt[]): void {
+/** Figures stand 8.2 px wide at their size: a label that would touch its neighbour goes one line up, one that would leave the drawing moves in. */
+function stagger(bolts: PlacedBolt[], box: number): void {
   const ends = [-Infinity, -Infinity];
   for (const bolt of bolts) {
     const half = ((bolt.label?.length ?? 0) * 8.2) / 2;
-    bolt.line = bolt.x - half > (ends[0] ?? 0) + 5 ? 0 : 1;
-    ends[bolt.line] = bolt.x + half;
+    bolt.labelX = pixel(Math.max(half + 2, Math.min(box - half - 2, bolt.x)));
+    bolt.line = bolt.labelX - half > (ends[0] ?? 0) + 5 ? 0 : 1;
+    ends[bolt.line] = bolt.labelX + half;
   }
 }

@@ -31,7 +31,7 @@ function CheckedWall({ answer }: { answer: CheckAnswer }) {
     const tone: BoltTone = engineered ? "engineered" : faulty.has(index) ? "bad" : "good";
     return { station: station.in, label: station.text, number: index + 1, tone, ...(offset === null ? {} : { across: offset.in }) };
   });
-  const added = answer.additions.map(({ station }): WallBolt => ({ station: station.in, label: station.text, number: "+", tone: "added" }));
+  const added = answer.additions.map(({ station }): WallBolt => ({ station: station.in, label: station.text, tone: "added" }));
   const gaps = answer.findings.flatMap(({ code, bolt, next, actual }) => {
     if (code !== "spacing" || bolt === null || next === null || typeof actual !== "object" || actual === null) return [];
     return [{ from: answer.bolts[bolt]!.station.in, to: answer.bolts[next]!.station.in, label: actual.text }];

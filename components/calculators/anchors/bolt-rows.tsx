@@ -79,18 +79,20 @@ function BoltRow({ form, row }: { form: AnchorsForm; row: number }) {
         <LengthField {...form.field(`bolts.${row}.station`)} label={t("anchors.bolts.station", { number })} />
         <LengthField {...form.field(`bolts.${row}.offset`)} label={t("anchors.bolts.offset", { number })} />
       </div>
-      <Disclosure summary={t("anchors.bolts.more", { number })} open={hasMore}>
-        <div className="rows-pair">
-          <LengthField {...form.field(`bolts.${row}.projection`)} label={t("anchors.bolts.projection")} />
-          <LengthField {...form.field(`bolts.${row}.diameter`)} label={t("anchors.bolts.diameter")} />
-        </div>
-        <CheckRow name={`bolts.${row}.engineered`} checked={engineered} onChange={(on) => form.set(`bolts.${row}.engineered`, on ? "true" : "")}>
-          {t("anchors.bolts.engineered")}
-        </CheckRow>
-      </Disclosure>
-      <Button kind="ghost" small className="no-print" onClick={() => form.removeRow("bolts", row)}>
-        {t("anchors.bolts.remove", { number })}
-      </Button>
+      <div className="rows-foot">
+        <Disclosure summary={t("anchors.bolts.more", { number })} open={hasMore}>
+          <div className="rows-pair">
+            <LengthField {...form.field(`bolts.${row}.projection`)} label={t("anchors.bolts.projection")} />
+            <LengthField {...form.field(`bolts.${row}.diameter`)} label={t("anchors.bolts.diameter")} />
+          </div>
+          <CheckRow name={`bolts.${row}.engineered`} checked={engineered} onChange={(on) => form.set(`bolts.${row}.engineered`, on ? "true" : "")}>
+            {t("anchors.bolts.engineered")}
+          </CheckRow>
+        </Disclosure>
+        <Button kind="ghost" small className="no-print" onClick={() => form.removeRow("bolts", row)}>
+          {t("anchors.bolts.remove", { number })}
+        </Button>
+      </div>
     </div>
   );
 }

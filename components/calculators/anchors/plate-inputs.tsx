@@ -41,7 +41,7 @@ export function PlateInputs({ form, mode }: { form: AnchorsForm; mode: Mode }) {
         <Segmented
           name="diameter"
           legend={t("anchors.plate.diameter")}
-          value={known ? matching(diameters, diameter) : diameter}
+          value={diameter === "" ? diameters[0] : known ? matching(diameters, diameter) : diameter}
           onChange={(value) => form.set("diameter", value)}
           options={options.map((value) => ({ value, label: <LengthText text={value.replace(" in", '"')} />, spoken: value }))}
         />
