@@ -1,13 +1,17 @@
 "use client";
 
-import { lazy, Suspense, useState, type ReactNode } from "react";
+import { lazy, Suspense, use, useState, type ReactNode } from "react";
 import { Button, ButtonLink } from "@/components/ui/button";
 import { ErrorSummary } from "@/components/ui/error-summary";
 import type { useCalculator } from "@/lib/client/calculator/use-calculator";
+import { FormHomeContext } from "@/lib/client/calculator/form-home";
 import { useTranslate } from "@/lib/client/i18n/messages-context";
+import { readable } from "@/lib/client/set/readable";
 import { PrecisionChoice } from "./precision-choice";
 
 const SendToPhone = lazy(() => import("@/components/links/send-to-phone").then(({ SendToPhone: component }) => ({ default: component })));
+
+const ReadingMode = lazy(() => import("@/components/set/reading-mode").then(({ ReadingMode: component }) => ({ default: component })));
 
 type CalculatorForm = Pick<ReturnType<typeof useCalculator>, "formProps" | "problems" | "asked" | "unit" | "precision" | "reset" | "flush" | "input" | "answer">;
 
@@ -36,6 +40,7 @@ interface CalculatorWorkspaceProps {
 /** One calculator's page in use: on a phone drawing, fields, verdict, results below each other; on a desk the fields stand left. */
 export function CalculatorWorkspace({ form, name, operation, header, drawing, fields, verdict, results, carries = [] }: CalculatorWorkspaceProps) {
   const t = useTranslate();
+  const home = use(FormHomeContext);
   return (
     <div className="calculator">
       <div className="calculator-header">{header}</div>
@@ -68,17 +73,41 @@ export function CalculatorWorkspace({ form, name, operation, header, drawing, fi
         {results}
         {form.answer === null ? null : (
           <div className="calculator-next no-print">
-            {carries.map(({ href, label }) => (
-              <ButtonLink key={href} href={href}>
-                {label}
-              </ButtonLink>
-            ))}
-            <CopyLink flush={form.flush} />
-            <PhoneLink name={name} operation={operation} input={form.input} />
+            {home?.next ??
+              carries.map(({ href, label }) => (
+                <ButtonLink key={href} href={href}>
+                  {label}
+                </ButtonLink>
+              ))}
+            {readable.includes(name) ? <ReadBig name={name} answer={form.answer} /> : null}
+            {home === null ? (
+              <>
+                <CopyLink flush={form.flush} />
+                <PhoneLink name={name} operation={operation} input={form.input} />
+              </>
+            ) : null}
           </div>
         )}
       </div>
     </div>
+  );
+}
+
+/** One reading a screen, for across the slab; fetched when asked for. */
+function ReadBig({ name, answer }: { name: string; answer: unknown }) {
+  const t = useTranslate();
+  const [open, setOpen] = useState(false);
+  return (
+    <>
+      <Button kind="ghost" onClick={() => setOpen(true)}>
+        {t("common.actions.readBig")}
+      </Button>
+      {open ? (
+        <Suspense fallback={null}>
+          <ReadingMode name={name} answer={answer} onClose={() => setOpen(false)} />
+        </Suspense>
+      ) : null}
+    </>
   );
 }
 

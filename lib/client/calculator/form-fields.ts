@@ -35,6 +35,11 @@ export function queryFromForm({ fields, unit, precision }: FormState): URLSearch
 /** A number without a unit or a mark of its own; a dash inside makes it feet and inches. */
 const bareNumber = /^\s*[-\u2010-\u2015\u2212]?[\d\s.,/\u2044\u00BC-\u00BE\u2150-\u215E]+$/;
 
+/** A length's text with its unit written out, so that it means the same in a form of another unit. */
+export function meant(text: string, unit: LengthUnit): string {
+  return /[\d\u00BC-\u00BE\u2150-\u215E]/.test(text) && bareNumber.test(text) ? `${text.trim()} ${unit}` : text;
+}
+
 /** Whether a field holds a length; `fields` for a field whose meaning another decides. */
 export type IsLength = (name: string, fields: Fields) => boolean;
 
@@ -43,7 +48,7 @@ export function inUnit(form: FormState, unit: LengthUnit, precision: Precision, 
   if (form.unit === unit) return { ...form, precision };
   const keepMeaning = ([name, text]: [string, string]): [string, string] => [
     name,
-    isLength(name, form.fields) && /[\d\u00BC-\u00BE\u2150-\u215E]/.test(text) && bareNumber.test(text) ? `${text.trim()} ${form.unit}` : text,
+    isLength(name, form.fields) ? meant(text, form.unit) : text,
   ];
   return { fields: Object.fromEntries(Object.entries(form.fields).map(keepMeaning)), unit, precision };
 }

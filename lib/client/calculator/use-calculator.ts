@@ -1,6 +1,6 @@
 "use client";
 
-import { useDeferredValue, useEffect, useMemo, useRef, useState, useSyncExternalStore, type FocusEvent, type FormEvent } from "react";
+import { use, useDeferredValue, useEffect, useMemo, useRef, useState, useSyncExternalStore, type FocusEvent, type FormEvent } from "react";
 import type { z } from "zod";
 import type { Answered, Issue, Operation } from "@/calculators/schema";
 import { inputFromQuery } from "@/calculators/schema/query";
@@ -11,6 +11,7 @@ import { precisionOf, unitOf } from "@/lib/client/settings/device-settings";
 import { deviceSettings, useDeviceSettings } from "@/lib/client/settings/use-device-settings";
 import { fieldId } from "./field-id";
 import { defaultPrecision, defaultUnit, queryFromForm, rowCount, withoutRow, type Fields, type FormState, type IsLength } from "./form-fields";
+import { FormHomeContext } from "./form-home";
 import { createFormStore } from "./form-store";
 
 /** What an answer page worked out on the server: the form as sent, and its answer or issues. */
@@ -49,7 +50,8 @@ export function useCalculator<AnswerSchema extends z.ZodType>({ name, load, isLe
   type Answer = z.output<AnswerSchema>;
   const t = useTranslate();
   const { unit, precision } = useDeviceSettings();
-  const [store] = useState(() => createFormStore(initial?.form ?? { fields: defaults ?? {}, unit: defaultUnit, precision: defaultPrecision }));
+  const home = use(FormHomeContext);
+  const [store] = useState(() => home?.open({ defaults: defaults ?? {}, isLength }) ?? createFormStore(initial?.form ?? { fields: defaults ?? {}, unit: defaultUnit, precision: defaultPrecision }));
   const form = useSyncExternalStore(store.subscribe, store.get, store.getInitial);
   const [loaded, setLoaded] = useState<LoadedOperation | null>(null);
   const [focused, setFocused] = useState<string | null>(null);
@@ -69,6 +71,10 @@ export function useCalculator<AnswerSchema extends z.ZodType>({ name, load, isLe
     if (loaded !== null) return loaded.answerTo(loaded.operation, input) as Answered<Answer>;
     return initial?.answered ?? nothingTyped;
   }, [loaded, input, initial]);
+
+  useEffect(() => {
+    if (loaded !== null) home?.report({ form: deferred, input, answer: answered.answer });
+  }, [home, loaded, deferred, input, answered]);
 
   const sentence = (issue: Issue): string => {
     const key = `errors.${issue.code}`;

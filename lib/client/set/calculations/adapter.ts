@@ -1,0 +1,46 @@
+import type { LengthAnswer } from "@/calculators/schema/measure";
+import { meant } from "@/lib/client/calculator/form-fields";
+import type { Calculation, KeyFigure, Layers, Texts } from "../schema";
+
+/** What a set needs to know of one calculator: its key figure, what it gives later stages, and what it adds to the plan. Pure; loaded with the stage. */
+export interface Adapter<Answer> {
+  key(answer: Answer): KeyFigure;
+  gives(answer: Answer, asked: Asked): Texts;
+  layers(answer: Answer, asked: Asked): Layers;
+  /** Figures worth calling across the slab, by the key of their name under `set.readings`. */
+  readings(answer: Answer): readonly Reading[];
+}
+
+export interface Reading {
+  key: string;
+  params?: Readonly<Record<string, string | number | undefined>>;
+  text: string;
+}
+
+/** What was asked: the form as typed, the plain input, and the wall it is about. */
+export interface Asked {
+  fields: Texts;
+  unit: Calculation["unit"];
+  input: Readonly<Record<string, unknown>>;
+  wall?: string;
+}
+
+/** A double of inches as a field takes it: never 1e-9, and a billionth of an inch is more than any tape shows. */
+export const inchText = (inches: number) => `${inches.toFixed(9).replace(/\.?0+$/, "").replace(/^-0$/, "0")} in`;
+
+/** A length of an answer as a text that loses nothing; irrational ones to a billionth of an inch. */
+export const exactText = ({ exact, in: inches }: Pick<LengthAnswer, "exact" | "in">) => (exact === null ? inchText(inches) : `${exact} in`);
+
+/** Some of the typed lengths, by new names, with their unit written out; blank ones are left out. */
+export function typed({ fields, unit }: Asked, names: Readonly<Record<string, string>>): Texts {
+  return Object.fromEntries(
+    Object.entries(names).flatMap(([name, field]) => {
+      const text = (fields[field] ?? "").trim();
+      return text === "" ? [] : [[name, meant(text, unit)]];
+    }),
+  );
+}
+
+export const keyFigure = (tone: KeyFigure["tone"], code: string, params: KeyFigure["params"] = {}): KeyFigure => ({ tone, code, params });
+
+export const pointOf = ({ x, y }: { x: number; y: number }): [number, number] => [x, y];

@@ -1,0 +1,13 @@
+import type { Adapter } from "./adapter";
+import { anchors } from "./anchors";
+import { fit } from "./fit";
+import { footprint } from "./footprint";
+import { inset } from "./inset";
+import { squareness } from "./squareness";
+
+const adapters: Readonly<Record<string, unknown>> = { squareness, footprint, inset, fit, anchors };
+
+/** The adapter of a calculator by its folder name; the answer given to it must be that calculator's. */
+export function adapterOf(calculator: string): Adapter<unknown> | undefined {
+  return adapters[calculator] as Adapter<unknown> | undefined;
+}

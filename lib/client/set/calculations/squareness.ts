@@ -1,0 +1,29 @@
+import type { SquarenessAnswer } from "@/calculators/squareness";
+import { exactText, inchText, keyFigure, pointOf, typed, type Adapter } from "./adapter";
+
+const corners = ["A", "B", "C", "D"] as const;
+
+/** On concrete and on chalk alike: what the tape said of four corners. */
+export const squareness: Adapter<SquarenessAnswer> = {
+  key({ verdict, difference, shape }) {
+    if (verdict === null) return keyFigure("plain", shape === "square" ? "square" : "difference", { difference: difference.text });
+    return keyFigure(verdict === "contradictory" ? "warn" : verdict === "out" ? "out" : "good", verdict, { difference: difference.text });
+  },
+  gives: ({ readings, corners: places }, asked) => ({
+    length: exactText(readings.ab.measured),
+    width: exactText(readings.da.measured),
+    ...typed(asked, { "sides.ab": "sides.ab", "sides.bc": "sides.bc", "sides.cd": "sides.cd", "sides.da": "sides.da", ac: "diagonals.ac", bd: "diagonals.bd", burn: "burn" }),
+    ...Object.fromEntries(corners.flatMap((name) => [[`corners.${name}.x`, inchText(places[name].x)], [`corners.${name}.y`, inchText(places[name].y)]])),
+  }),
+  layers: ({ corners: places }) => ({ slab: corners.map((name) => pointOf(places[name])) }),
+  readings: ({ target, difference, rack }) => [
+    { key: "squareness.difference", text: difference.text },
+    ...(rack.toward === null
+      ? []
+      : [
+          { key: "squareness.move", params: { corner: rack.toward }, text: rack.distance.text },
+          { key: "squareness.target", params: { pull: "AC" }, text: target.readings.ac.text },
+          { key: "squareness.target", params: { pull: "BD" }, text: target.readings.bd.text },
+        ]),
+  ],
+};

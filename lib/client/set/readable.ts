@@ -1,0 +1,2 @@
+/** Calculators whose figures can be read big. */
+export const readable: readonly string[] = ["squareness", "corner", "inset", "anchors", "conversions", "footprint", "fit"];
