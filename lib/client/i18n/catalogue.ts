@@ -6,10 +6,13 @@ import enCorner from "../messages/en/corner.json";
 import enDevelopers from "../messages/en/developers.json";
 import enErrors from "../messages/en/errors.json";
 import enFailure from "../messages/en/failure.json";
+import enFootprint from "../messages/en/footprint.json";
+import enFit from "../messages/en/fit.json";
 import enHome from "../messages/en/home.json";
 import enInset from "../messages/en/inset.json";
 import enLegal from "../messages/en/legal.json";
 import enLinks from "../messages/en/links.json";
+import enSet from "../messages/en/set.json";
 import enSquareness from "../messages/en/squareness.json";
 import esAnchors from "../messages/es/anchors.json";
 import esCautions from "../messages/es/cautions.json";
@@ -19,14 +22,17 @@ import esCorner from "../messages/es/corner.json";
 import esDevelopers from "../messages/es/developers.json";
 import esErrors from "../messages/es/errors.json";
 import esFailure from "../messages/es/failure.json";
+import esFootprint from "../messages/es/footprint.json";
+import esFit from "../messages/es/fit.json";
 import esHome from "../messages/es/home.json";
 import esInset from "../messages/es/inset.json";
 import esLegal from "../messages/es/legal.json";
 import esLinks from "../messages/es/links.json";
+import esSet from "../messages/es/set.json";
 import esSquareness from "../messages/es/squareness.json";
 import type { Locale } from "./locales";
 
-export const namespaces = ["common", "cautions", "errors", "failure", "home", "legal", "developers", "links", "squareness", "corner", "inset", "anchors", "conversions"] as const;
+export const namespaces = ["common", "cautions", "errors", "failure", "home", "legal", "developers", "links", "set", "squareness", "footprint", "fit", "corner", "inset", "anchors", "conversions"] as const;
 export type Namespace = (typeof namespaces)[number];
 
 /** A namespace's messages as written: sentences in ICU MessageFormat under nested keys. */
@@ -43,7 +49,10 @@ export const catalogue: Readonly<Record<Locale, Readonly<Record<Namespace, Messa
     legal: enLegal,
     developers: enDevelopers,
     links: enLinks,
+    set: enSet,
     squareness: enSquareness,
+    fit: enFit,
+    footprint: enFootprint,
     corner: enCorner,
     inset: enInset,
     anchors: enAnchors,
@@ -58,7 +67,10 @@ export const catalogue: Readonly<Record<Locale, Readonly<Record<Namespace, Messa
     legal: esLegal,
     developers: esDevelopers,
     links: esLinks,
+    set: esSet,
     squareness: esSquareness,
+    fit: esFit,
+    footprint: esFootprint,
     corner: esCorner,
     inset: esInset,
     anchors: esAnchors,

@@ -1,0 +1,72 @@
+"use client";
+
+import type { LengthFieldProps } from "@/components/length-field/length-field";
+import { LengthField } from "@/components/length-field/length-field";
+import { Disclosure } from "@/components/ui/disclosure";
+import { LengthText } from "@/components/ui/length-text";
+import { Segmented } from "@/components/ui/segmented";
+import { useTranslate } from "@/lib/client/i18n/messages-context";
+
+/** Panel thicknesses by their label (PS 1 and PS 2 performance categories). */
+export const insetPresets = ["7/16 in", "15/32 in", "1/2 in", "19/32 in"] as const;
+
+/** The part of a form that these pieces use; any calculator's has it. */
+export interface PlanForm {
+  field: (name: string) => Omit<LengthFieldProps, "label">;
+  value: (name: string) => string;
+  set: (name: string, text: string) => void;
+  change: (fields: Readonly<Record<string, string>>) => void;
+  errorAt: (name: string) => string | undefined;
+  rows: (list: string) => number;
+  removeRow: (list: string, row: number) => void;
+  unit: LengthFieldProps["unit"];
+}
+
+/** The inset: one for every side, four labels that fill it, and sides of their own. `sides` are the plan's, such as ab. */
+export function InsetInputs({ form, namespace, sides }: { form: PlanForm; namespace: string; sides: readonly string[] }) {
+  const t = useTranslate();
+  const typed = form.value("inset").trim();
+  const chosen = insetPresets.find((preset) => preset === typed || preset === `${typed} in`) ?? "";
+  return (
+    <>
+      <LengthField {...form.field("inset")} label={t(`${namespace}.inset.label`)} hint={t(`${namespace}.inset.hint`)} />
+      <Segmented
+        name="preset"
+        legend={t(`${namespace}.inset.preset`)}
+        legendIs="hidden"
+        value={typed === "" ? form.value("preset") : chosen}
+        onChange={(preset) => form.change({ preset: "", inset: preset })}
+        options={insetPresets.map((preset) => ({ value: preset, label: <LengthText text={preset.replace(" in", '"')} />, spoken: preset }))}
+      />
+      <Disclosure summary={t(`${namespace}.inset.each`)} open={sides.some((side) => form.value(`each.${side}`) !== "")}>
+        <p>{t(`${namespace}.inset.eachHint`)}</p>
+        {sides.map((side) => (
+          <LengthField key={side} {...form.field(`each.${side}`)} error={form.errorAt(`inset.${side}`)} label={t(`${namespace}.inset.of`, { side: spokenSide(side) })} />
+        ))}
+      </Disclosure>
+    </>
+  );
+}
+
+/** `ab` as people write it: A-B. */
+export function spokenSide(side: string): string {
+  return side.toUpperCase().split("").join("-");
+}
+
+type Tree = Record<string, unknown>;
+export const isTree = (value: unknown): value is Tree => typeof value === "object" && value !== null && !Array.isArray(value);
+
+/** The page's `inset`, `preset` and `each` as the API's inset: sides of their own beside one for the others. */
+export function insetOf({ inset, preset, each }: Tree): unknown {
+  const common = typeof inset === "string" ? inset : isTree(inset) ? undefined : preset;
+  const own = { ...(isTree(inset) ? inset : {}), ...(isTree(each) ? each : {}) };
+  if (Object.keys(own).length === 0) return common;
+  return common === undefined ? own : { ...own, other: common };
+}
+
+/** Rows at the end that lack `field` are blank ones, not yet filled in. */
+export function withoutBlankEnd(rows: unknown, field: string): unknown {
+  if (!Array.isArray(rows)) return rows;
+  const last = rows.findLastIndex((row) => isTree(row) && row[field] !== undefined);
+  return last < 0 ? undefined : rows.slice(0, last + 1);
+}
