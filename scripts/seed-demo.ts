@@ -5,8 +5,8 @@ import { ShortLink } from "@/models";
 
 /** An invented slab, read once when it was true and once when it had racked. */
 const demoLinks = [
-  { id: "demoSquare", operation: "squareness", inputs: { sides: { ab: "28' 1\"", da: "22' 1\"" }, diagonals: { ac: "35' 8 7/16\"", bd: "35' 8 7/16\"" }, burn: "1", tolerance: "1/4" } },
-  { id: "demoRacked", operation: "squareness", inputs: { sides: { ab: "28' 1\"", da: "22' 1\"" }, diagonals: { ac: "35' 9 1/4\"", bd: "35' 7 5/8\"" }, burn: "1", tolerance: "1/4" } },
+  { id: "demoSquare", operation: "squareness", inputs: { sides: { ab: "28' 1\"", da: "22' 1\"" }, diagonals: { ac: "35' 8 5/16\"", bd: "35' 8 5/16\"" }, burn: "1", tolerance: "1/4" } },
+  { id: "demoRacked", operation: "squareness", inputs: { sides: { ab: "28' 1\"", da: "22' 1\"" }, diagonals: { ac: "35' 9 1/8\"", bd: "35' 7 1/2\"" }, burn: "1", tolerance: "1/4" } },
 ];
 
 /** Writes the demo links with the answers this core gives, for the calculators it has. */
