@@ -6,8 +6,8 @@ export async function register(): Promise<void> {
   if (process.env.NEXT_RUNTIME !== "nodejs") return;
   const { checkEnvironment } = await import("@/lib/env");
   checkEnvironment();
-  const { watchPeerAddresses } = await import("@/lib/http/peer-address");
-  watchPeerAddresses();
+  const { prepareRequests } = await import("@/lib/http/incoming-requests");
+  prepareRequests();
   const { startDeletingLinks } = await import("@/lib/services/links/delete-unopened");
   startDeletingLinks();
 }

@@ -1,7 +1,7 @@
 import "server-only";
 import { env } from "@/lib/env";
 import { clientAddress } from "./client-address";
-import { peerHeader } from "./peer-address";
+import { peerHeader } from "./incoming-requests";
 
 /** Who asks. Without a key it is an address and no more. */
 export interface Caller {

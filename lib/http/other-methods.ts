@@ -2,6 +2,7 @@ import "server-only";
 import { randomUUID } from "node:crypto";
 import { openHeaders, preflightHeaders } from "./cors";
 import type { Endpoint } from "./endpoint";
+import { methodHeader } from "./incoming-requests";
 import { Problem } from "./problem";
 import { problemResponse } from "./problem-response";
 
@@ -21,7 +22,8 @@ export function otherMethods<Params>(served: Partial<Record<Method, Endpoint<Par
   const preflight = open ? preflightHeaders(names.filter((name) => name !== "OPTIONS").join(", ")) : {};
 
   const refuse: Handler = (request) => problemResponse(new Problem("method-not-allowed", { headers: { Allow: allow }, params: { methods: allow } }), request, { "Request-Id": randomUUID(), ...(open && openHeaders) });
-  const options: Handler = () => new Response(null, { status: 204, headers: { Allow: allow, "Request-Id": randomUUID(), "Cache-Control": "no-store", ...preflight } });
+  const preflightAnswer = () => new Response(null, { status: 204, headers: { Allow: allow, "Request-Id": randomUUID(), "Cache-Control": "no-store", ...preflight } });
+  const options: Handler = (request) => (request.headers.has(methodHeader) ? refuse(request) : preflightAnswer());
   const answerTo = (method: Method) => (method === "OPTIONS" ? options : names.includes(method) ? undefined : refuse);
   return Object.fromEntries(methods.map((method) => [method, answerTo(method)])) as Record<Method, Handler | undefined>;
 }

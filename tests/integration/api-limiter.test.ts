@@ -54,10 +54,10 @@ const timed = async <Answer>(work: Promise<Answer>) => {
 };
 
 describe("the limit all processes share", () => {
-  test("lets sixty through at once from one address, and the sixty-first not", async () => {
-    const limiter = limiterAt(url, 60);
-    const answers = await Promise.all(Array.from({ length: 61 }, () => limiter.spend("crowd", 1)));
-    expect(answers.filter(({ passed }) => passed)).toHaveLength(60);
+  test("lets twenty of thirty through that ask at once from one address", async () => {
+    const limiter = limiterAt(url, 20); // one more each 3 s: a busy machine has time to ask them all before
+    const answers = await Promise.all(Array.from({ length: 30 }, () => limiter.spend("crowd", 1)));
+    expect(answers.filter(({ passed }) => passed)).toHaveLength(20);
   });
 
   test("is one limit for two processes that ask at the same moment", async () => {

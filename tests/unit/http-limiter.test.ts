@@ -1,7 +1,8 @@
 import fc from "fast-check";
 import { describe, expect, test, vi } from "vitest";
 import { bucketFor, waitFor } from "@/lib/services/limiter/bucket-shape";
-import { Reserve } from "@/lib/services/limiter/reserve";
+import { LocalShare } from "@/lib/services/limiter/local-share";
+import { Reserve, type Drawn } from "@/lib/services/limiter/reserve";
 import { StoreHealth } from "@/lib/services/limiter/store-health";
 
 describe("a bucket for so many a minute", () => {
@@ -122,5 +123,81 @@ describe("the store's health", () => {
       health.failed(new Error("down"));
     }
     expect(report).toHaveBeenCalledTimes(3);
+  });
+});
+
+describe("what a process keeps of the shared limit", () => {
+  /** A bucket as the store has it, and how often it was asked. */
+  function storeOf(capacity: number) {
+    const state = { tokens: capacity, asked: 0 };
+    const store = {
+      draw: (_key: string, cost: number): Promise<Drawn> => {
+        state.asked += 1;
+        const passed = state.tokens >= cost;
+        if (passed) state.tokens -= cost;
+        return Promise.resolve({ passed, tokens: state.tokens, wait: passed ? 0 : 5_000 });
+      },
+      giveBack: (_key: string, tokens: number) => {
+        state.asked += 1;
+        state.tokens += tokens;
+        return Promise.resolve();
+      },
+    };
+    return { state, store };
+  }
+
+  test("is nothing on the plan of those without a key: each call is counted in the one place", async () => {
+    const { state, store } = storeOf(60);
+    const share = new LocalShare(store, 60);
+    for (let call = 1; call <= 60; call += 1) {
+      expect(await share.draw("someone", 1, 1000)).toMatchObject({ passed: true, tokens: 60 - call });
+      expect(state).toEqual({ tokens: 60 - call, asked: call });
+    }
+  });
+
+  test("is that a bucket it found empty still is, so that a flood of refused calls never reaches the store", async () => {
+    const { state, store } = storeOf(0);
+    const share = new LocalShare(store, 60);
+    const now = Date.now();
+    const first = await share.draw("someone", 1, now);
+    for (let call = 0; call < 1000; call += 1) expect((await share.draw("someone", 1 + (call % 3), now + call)).passed).toBe(false);
+    expect(state.asked).toBe(1);
+    expect((await share.draw("someone", 1, now + 1000)).wait).toBeLessThanOrEqual(first.wait - 900);
+    state.tokens = 1;
+    expect((await share.draw("someone", 1, now + 5_100)).passed).toBe(true);
+  });
+
+  test("refuses no lighter call for a heavier one's sake", async () => {
+    const { store } = storeOf(10);
+    const share = new LocalShare(store, 60);
+    expect((await share.draw("someone", 40)).passed).toBe(false);
+    expect((await share.draw("someone", 10)).passed).toBe(true);
+  });
+
+  test("on a large plan is a tenth of a second's worth at a time, and never one more than the bucket held", async () => {
+    const { state, store } = storeOf(6_000);
+    const share = new LocalShare(store, 6_000);
+    const now = Date.now();
+    let passed = 0;
+    for (let call = 0; call < 7_000; call += 1) passed += Number((await share.draw("someone", 1, now)).passed);
+    expect(passed).toBe(6_000);
+    expect(state.tokens).toBe(0);
+    expect(state.asked).toBeLessThan(700);
+  });
+
+  test("is given back when nobody came for it within a second", async () => {
+    const { state, store } = storeOf(6_000);
+    const share = new LocalShare(store, 6_000);
+    const now = Date.now();
+    for (let call = 0; call < 205; call += 1) await share.draw("someone", 1, now);
+    expect(state.tokens).toBeLessThan(6_000 - 205);
+    await share.draw("someone", 1, now + 10_000);
+    expect(state.tokens).toBe(6_000 - 206);
+  });
+
+  test("takes a bounded amount of memory", async () => {
+    const share = new LocalShare(storeOf(1e9).store, 60, 100);
+    for (let number = 0; number < 1000; number += 1) await share.draw(`address ${number}`, 1);
+    expect(share.size).toBe(100);
   });
 });

@@ -1,6 +1,7 @@
 import "server-only";
 import type { Redis } from "@upstash/redis";
 import { log } from "@/lib/services/log";
+import { LocalShare } from "./local-share";
 import { Reserve, type Drawn } from "./reserve";
 import { Shared } from "./shared";
 import { StoreHealth } from "./store-health";
@@ -28,6 +29,7 @@ export interface Limiter {
 
 export function makeLimiter({ policy, perMinute, redis }: { policy: string; perMinute: number; redis: Redis }): Limiter {
   const shared = new Shared(redis, `sillwright:${policy}`, perMinute);
+  const share = new LocalShare(shared, perMinute);
   const reserve = new Reserve(Math.max(1, Math.floor(perMinute * reducedShare)));
   // A key of its own, so that asking whether the store is back costs nobody a calculation.
   const health = new StoreHealth(async () => void (await shared.draw("probe", 1)), (error) => log().warn({ policy, reason: reasonOf(error) }, "the limiter's store is away; a smaller limit in this process stands in"));
@@ -44,7 +46,7 @@ export function makeLimiter({ policy, perMinute, redis }: { policy: string; perM
         return fromReserve(key, cost);
       }
       try {
-        return told(policy, perMinute, await shared.draw(key, cost));
+        return told(policy, perMinute, await share.draw(key, cost));
       } catch (error) {
         health.failed(error);
         return fromReserve(key, cost);
@@ -57,9 +59,10 @@ function told(policy: string, limit: number, { passed, tokens, wait }: Drawn): S
   return { policy, limit, remaining: Math.max(0, tokens), passed, seconds: Math.max(passed ? 0 : 1, Math.ceil(wait / 1000)) };
 }
 
+/** The innermost cause: what the network said, not what we made of it. */
 function reasonOf(error: unknown): string {
-  const cause = error instanceof Error ? (error.cause ?? error) : error;
-  const inner = cause instanceof Error ? (cause.cause ?? cause) : cause;
-  const { code, name } = inner as { code?: string; name?: string };
-  return code ?? (inner === error ? (error as Error).message : (name ?? "unknown"));
+  if (!(error instanceof Error)) return "unknown";
+  if (error.cause instanceof Error) return reasonOf(error.cause);
+  const { code } = error as { code?: string };
+  return code ?? error.message;
 }

@@ -44,6 +44,11 @@ export class Shared {
     return { passed: false, tokens: Math.min(held, cost - 1), wait: Math.max(1, heldAt + waitFor(this.shape, left.remaining, cost) - now) };
   }
 
+  /** @throws StoreAway */
+  async giveBack(key: string, tokens: number): Promise<void> {
+    await this.ask(() => this.ratelimit.limit(key, { rate: -tokens }));
+  }
+
   private async ask<Answer>(question: () => Promise<Answer>): Promise<Answer> {
     try {
       return await inTime(question());
