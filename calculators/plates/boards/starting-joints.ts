@@ -36,7 +36,8 @@ export function startingJoints(stretch: StretchToCut, kinds: readonly BoardKind[
       starts.set(joints.join(), { way, joints, whole: lengths.reduce((sum, length) => sum + (usable.includes(length) ? length : 0), 0) });
     }
   });
-  return [...starts.values()].sort((a, b) => b.whole - a.whole);
+  // A crew begins with the whole board: of equals the one with the longer first piece.
+  return [...starts.values()].sort((a, b) => b.whole - a.whole || (b.joints[0] ?? 0) - (a.joints[0] ?? 0));
 }
 
 type Bounds = readonly (readonly [number, number])[];

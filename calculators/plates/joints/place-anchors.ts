@@ -27,6 +27,7 @@ interface Link {
  * The fewest anchors that make a piece with these ends keep the rule, put where they are easy to mark. Null when none do.
  */
 export function placeAnchors(stretch: LaidStretch, limits: PieceLimits, [from, to]: Interval, taste: AnchorTaste): PlacedAnchor[] | null {
+  if (limits.perPiece === 0) return [];
   const fixed = stretch.bolts.filter((bolt) => bolt.counts && bolt.at > from && bolt.at < to).map((bolt) => bolt.at);
   const stops = [from, ...fixed, to];
   const links = stops.slice(1).map((stop, index): Link => ({ from: stops[index]!, to: stop, fromEnd: index === 0, toEnd: index === stops.length - 2 }));
