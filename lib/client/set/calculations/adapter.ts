@@ -4,6 +4,8 @@ import type { Calculation, KeyFigure, Layers, Texts } from "../schema";
 
 /** What a set needs to know of one calculator: its key figure, what it gives later stages, and what it adds to the plan. Pure; loaded with the stage. */
 export interface Adapter<Answer> {
+  /** Its path under /api/v1. */
+  operation(answer: Answer): string;
   key(answer: Answer): KeyFigure;
   gives(answer: Answer, asked: Asked): Texts;
   layers(answer: Answer, asked: Asked): Layers;

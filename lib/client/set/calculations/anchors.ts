@@ -3,6 +3,7 @@ import { exactText, keyFigure, typed, type Adapter } from "./adapter";
 
 /** One wall's bolts, laid out anew or judged as they stand. */
 export const anchors: Adapter<LayoutAnswer | CheckAnswer> = {
+  operation: (answer) => ("ok" in answer ? "anchors/check" : "anchors/layout"),
   key(answer) {
     if (!("ok" in answer)) return keyFigure("good", "layout", { bolts: answer.bolts });
     if (answer.ok) return keyFigure("good", "ok", { bolts: answer.bolts.length });

@@ -2,6 +2,7 @@ import type { FitAnswer } from "@/calculators/fit";
 import { exactText, inchText, keyFigure, pointOf, type Adapter } from "./adapter";
 
 export const fit: Adapter<FitAnswer> = {
+  operation: () => "fits",
   key: ({ fits, worst, overhangNeeded }) => (fits ? keyFigure("good", "worst", { worst: worst.text }) : keyFigure("out", "overhangs", { needed: overhangNeeded?.text ?? worst.text })),
   gives: ({ lines, ranges, checks }) => ({
     ...Object.fromEntries(Object.entries(lines).map(([side, length]) => [`line.${side}`, exactText(length)])),

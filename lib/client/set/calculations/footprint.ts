@@ -7,6 +7,7 @@ type Placed = FootprintAnswer["corners"][number] & { x: number; y: number };
 const placed = ({ corners }: FootprintAnswer): Placed[] => (corners.every(({ x, y }) => x !== null && y !== null) ? (corners as Placed[]) : []);
 
 export const footprint: Adapter<FootprintAnswer> = {
+  operation: () => "footprints",
   key(answer) {
     const { unfixed, closure, adjustment, corners, perimeter } = answer;
     if (adjustment?.contradictory === true) return keyFigure("warn", "contradictory");

@@ -5,6 +5,7 @@ const corners = ["A", "B", "C", "D"] as const;
 const sides = ["ab", "bc", "cd", "da"] as const;
 
 export const inset: Adapter<InsetAnswer> = {
+  operation: () => "insets",
   key({ check, lines }) {
     if (check === null) return keyFigure("plain", "lines", { along: lines.ab.text, across: lines.bc.text });
     return check.agrees ? keyFigure("good", "agrees", { along: lines.ab.text, across: lines.bc.text }) : keyFigure("out", "off");

@@ -5,6 +5,7 @@ const corners = ["A", "B", "C", "D"] as const;
 
 /** On concrete and on chalk alike: what the tape said of four corners. */
 export const squareness: Adapter<SquarenessAnswer> = {
+  operation: () => "squareness",
   key({ verdict, difference, shape }) {
     if (verdict === null) return keyFigure("plain", shape === "square" ? "square" : "difference", { difference: difference.text });
     return keyFigure(verdict === "contradictory" ? "warn" : verdict === "out" ? "out" : "good", verdict, { difference: difference.text });

@@ -1,0 +1,12 @@
+"use client";
+
+import type { ComponentType, ReactNode } from "react";
+
+type StageCalculator = ComponentType<{ header: ReactNode }>;
+
+/** The calculators' own pieces by folder name, each fetched with its stage. A test fails while one with a stage is missing here. */
+export const stageCalculators: Readonly<Record<string, () => Promise<StageCalculator>>> = {
+  squareness: () => import("@/components/calculators/squareness/squareness-calculator").then((module) => module.SquarenessCalculator),
+  inset: () => import("@/components/calculators/inset/inset-calculator").then((module) => module.InsetCalculator),
+  anchors: () => import("@/components/calculators/anchors/anchors-calculator").then((module) => module.AnchorsCalculator),
+};
