@@ -42,7 +42,7 @@ export type LayoutAnswer = z.output<typeof layoutAnswer>;
  * (l − 2e)/(n − 1) apart, n the least with that within the spacing, and never under the rule's number. A rule that states
  * no number or no end distance leaves both to the layout: two bolts, `endDistance` from the ends.
  *
- * @throws CalculationError `end-distance-outside-rule`, `piece-too-short`, `no-layout`, `diameter-under-rule`, `too-many-bolts`.
+ * @throws CalculationError `end-distance-outside-rule`, `end-distance-under-rule`, `piece-too-short`, `no-layout`, `diameter-under-rule`, `too-many-bolts`.
  * @example 10 ft with end bolts at 12 in under us-irc takes 3 bolts, 48 in apart (domain.md B10).
  */
 export function layOutBolts(input: LayoutInput): LayoutAnswer {
@@ -78,8 +78,9 @@ function endDistanceOf({ endDistance, precision }: LayoutInput, { endMinimum, wa
   const fits = (value: Length) => (endMinimum === null || value.compare(endMinimum) >= 0) && (endMaximum === null || value.compare(endMaximum) <= 0);
   if (endDistance === undefined) return endDistanceWithin(endMinimum, endMaximum);
   if (fits(endDistance)) return endDistance;
-  const text = (value: Length | null) => (value === null ? "" : measure(value, precision).text);
-  throw new CalculationError([{ pointer: "/endDistance", code: "end-distance-outside-rule", params: { least: text(endMinimum ?? Length.zero), most: text(endMaximum) } }]);
+  const text = (value: Length) => measure(value, precision).text;
+  const issue = endMaximum === null ? { code: "end-distance-under-rule", params: { least: text(endMinimum!) } } : { code: "end-distance-outside-rule", params: { least: text(endMinimum ?? Length.zero), most: text(endMaximum) } };
+  throw new CalculationError([{ pointer: "/endDistance", ...issue }]);
 }
 
 /** A layout for bolts the rule does not allow would be no layout. */
