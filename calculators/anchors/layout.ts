@@ -79,8 +79,9 @@ function endDistanceOf({ endDistance, precision }: LayoutInput, { endMinimum, wa
   if (endDistance === undefined) return endDistanceWithin(endMinimum, endMaximum);
   if (fits(endDistance)) return endDistance;
   const text = (value: Length) => measure(value, precision).text;
-  const issue = endMaximum === null ? { code: "end-distance-under-rule", params: { least: text(endMinimum!) } } : { code: "end-distance-outside-rule", params: { least: text(endMinimum ?? Length.zero), most: text(endMaximum) } };
-  throw new CalculationError([{ pointer: "/endDistance", ...issue }]);
+  const least = text(endMinimum ?? Length.zero);
+  if (endMaximum === null) throw new CalculationError([{ pointer: "/endDistance", code: "end-distance-under-rule", params: { least } }]);
+  throw new CalculationError([{ pointer: "/endDistance", code: "end-distance-outside-rule", params: { least, most: text(endMaximum) } }]);
 }
 
 /** A layout for bolts the rule does not allow would be no layout. */
