@@ -32,5 +32,5 @@ export function HardwareNotes({ answer: { hole, washer } }: { answer: RuleAnswer
 export function NotStated({ answer }: { answer: RuleAnswer }) {
   const t = useTranslate();
   if (answer.notStated.length === 0) return null;
-  return <li>{t("anchors.silent.notStated", { figures: answer.notStated.map((name) => t(`anchors.figure.${name}`).toLocaleLowerCase(t.locale)).join(", ") })}</li>;
+  return <li>{t("anchors.silent.notStated", { figures: answer.notStated.map((name) => t(`anchors.figure.${name}`).toLocaleLowerCase(t.locale)).join("; ") })}</li>;
 }

@@ -16,6 +16,7 @@ export function MoreInputs({ form, mode }: { form: AnchorsForm; mode: Mode }) {
       {t(`anchors.more.${name}`)}
     </CheckRow>
   );
+  const usual = form.unit === "mm" ? { plate: "38 mm", washer: "3 mm" } : { plate: '1 1/2"', washer: '1/8"' };
   return (
     <>
       <Disclosure summary={t(mode === "layout" ? "anchors.more.moduleTitle" : "anchors.more.joistsTitle")} id="joists" open={isTyped("members.spacing", "module")}>
@@ -25,7 +26,7 @@ export function MoreInputs({ form, mode }: { form: AnchorsForm; mode: Mode }) {
           <LengthField {...form.field("members.first")} label={t("anchors.more.first")} hint={t("anchors.more.firstHint")} />
         </div>
         <div className="rows-pair">
-          <LengthField {...form.field("members.thickness")} label={t("anchors.more.thickness")} hint={t("anchors.more.thicknessHint")} />
+          <LengthField {...form.field("members.thickness")} label={t("anchors.more.thickness")} hint={t("anchors.more.thicknessHint", { length: usual.plate })} />
           <LengthField {...form.field("members.clearance")} label={t("anchors.more.clearance")} hint={t("anchors.more.clearanceHint")} />
         </div>
         {mode === "layout" ? (
@@ -40,8 +41,8 @@ export function MoreInputs({ form, mode }: { form: AnchorsForm; mode: Mode }) {
         {mode === "check" ? (
           <>
             <div className="rows-pair">
-              <LengthField {...form.field("plateThickness")} label={t("anchors.more.plateThickness")} hint={t("anchors.more.plateThicknessHint")} />
-              <LengthField {...form.field("washerThickness")} label={t("anchors.more.washerThickness")} hint={t("anchors.more.washerThicknessHint")} />
+              <LengthField {...form.field("plateThickness")} label={t("anchors.more.plateThickness")} hint={t("anchors.more.plateThicknessHint", { length: usual.plate })} />
+              <LengthField {...form.field("washerThickness")} label={t("anchors.more.washerThickness")} hint={t("anchors.more.washerThicknessHint", { length: usual.washer })} />
             </div>
             <LengthField {...form.field("washer")} label={t("anchors.more.washer")} hint={t("anchors.more.washerHint")} />
             {flag("shearWall")}

@@ -47,7 +47,7 @@ export function PlateInputs({ form, mode }: { form: AnchorsForm; mode: Mode }) {
         />
         {form.errorAt("diameter") === undefined ? null : <p className="field-error">{form.errorAt("diameter")}</p>}
       </div>
-      {mode === "layout" ? <LengthField {...form.field("endDistance")} label={t("anchors.plate.endDistance")} hint={t("anchors.plate.endDistanceHint")} /> : null}
+      {mode === "layout" ? <LengthField {...form.field("endDistance")} label={t("anchors.plate.endDistance")} hint={t("anchors.plate.endDistanceHint", { length: form.unit === "mm" ? "203 mm" : '8"' })} /> : null}
     </>
   );
 }

@@ -51,7 +51,7 @@ export function InsetInputs({ form, answer }: { form: InsetForm; answer: InsetAn
         {sides.map((side) => (
           <LengthField key={side} {...form.field(`chalkLines.${side}`)} label={t("inset.fields.chalkLine", { side: t(`inset.side.${side}`) })} hint={t("inset.fields.asRead")} burn={burn} />
         ))}
-        <LengthField {...form.field("readingError")} label={t("inset.fields.readingError")} hint={t("inset.fields.readingErrorHint")} />
+        <LengthField {...form.field("readingError")} label={t("inset.fields.readingError")} hint={t("inset.fields.readingErrorHint", { length: form.unit === "mm" ? "3 mm" : '1/8"' })} />
       </Disclosure>
     </>
   );

@@ -56,6 +56,7 @@ export function createFormStore(initial: FormState) {
       return () => {
         listeners.delete(listener);
         if (listeners.size > 0) return;
+        adopted = null; // whoever subscribes next reads the address again, and takes the device's settings again
         clearTimeout(timer);
         window.removeEventListener("pagehide", writeAddress);
       };
