@@ -53,6 +53,8 @@ const config = {
           { key: "Cross-Origin-Opener-Policy", value: "same-origin" },
         ],
       },
+      // A stale worker would keep a phone on an old edition of the site.
+      { source: "/sw.js", headers: [{ key: "Cache-Control", value: "no-cache" }] },
     ];
   },
 };

@@ -5,7 +5,7 @@ import { localePath, locales } from "@/lib/client/i18n/locales";
 
 export const dynamic = "force-static";
 
-const pages = ["/", "/calculators", ...calculators.map(({ name }) => `/calculators/${name}`), "/developers", "/privacy", "/terms", "/accessibility", "/contact"];
+const pages = ["/", "/set", "/calculators", ...calculators.map(({ name }) => `/calculators/${name}`), "/developers", "/privacy", "/terms", "/accessibility", "/contact"];
 
 /** Every public page in every language, each naming the others. */
 export default function sitemap(): MetadataRoute.Sitemap {

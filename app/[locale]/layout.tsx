@@ -1,11 +1,13 @@
 import type { Metadata, Viewport } from "next";
 import { notFound } from "next/navigation";
 import type { ReactNode } from "react";
+import { OfflineReady } from "@/components/site/offline-ready";
 import { SiteFooter } from "@/components/site/site-footer";
 import { SiteHeader } from "@/components/site/site-header";
 import { env } from "@/lib/env";
 import { getTranslate, loadMessages } from "@/lib/client/i18n/load-messages";
-import { isLocale, locales } from "@/lib/client/i18n/locales";
+import { isLocale, localePath, locales } from "@/lib/client/i18n/locales";
+import type { LocaleProps } from "@/lib/client/i18n/page-locale";
 import { MessagesProvider } from "@/lib/client/i18n/messages-context";
 import { settingsScript } from "@/lib/client/settings/settings-script";
 import { fontClasses } from "../fonts";
@@ -17,12 +19,16 @@ export function generateStaticParams() {
   return locales.map((locale) => ({ locale }));
 }
 
-export const metadata: Metadata = {
-  metadataBase: new URL(env.SITE_URL),
-  applicationName: "Sillwright",
-  formatDetection: { telephone: false, date: false, address: false, email: false },
-  icons: { icon: [{ url: "/icons/icon.svg", type: "image/svg+xml" }], apple: "/icons/apple-touch-icon.png" },
-};
+export async function generateMetadata({ params }: LocaleProps): Promise<Metadata> {
+  const { locale } = await params;
+  return {
+    metadataBase: new URL(env.SITE_URL),
+    applicationName: "Sillwright",
+    formatDetection: { telephone: false, date: false, address: false, email: false },
+    icons: { icon: [{ url: "/icons/icon.svg", type: "image/svg+xml" }], apple: "/icons/apple-touch-icon.png" },
+    manifest: isLocale(locale) ? localePath(locale, "/manifest.webmanifest") : undefined,
+  };
+}
 
 export const viewport: Viewport = {
   width: "device-width",
@@ -48,6 +54,7 @@ export default async function Layout({ children, params }: { children: ReactNode
           <SiteHeader t={t} />
           {children}
           <SiteFooter t={t} />
+          <OfflineReady />
         </MessagesProvider>
       </body>
     </html>

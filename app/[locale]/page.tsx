@@ -28,9 +28,9 @@ export default async function HomePage(props: LocaleProps) {
           </h1>
           <p className="hero-text">{t("home.hero.text")}</p>
           <div className="hero-actions">
-            <ButtonLink href={localePath(locale, "/calculators/squareness")}>{t("home.hero.check")}</ButtonLink>
-            <ButtonLink kind="ghost" href={localePath(locale, "/calculators")}>
-              {t("home.hero.all")}
+            <ButtonLink href={localePath(locale, "/set")}>{t("home.hero.start")}</ButtonLink>
+            <ButtonLink kind="ghost" href={localePath(locale, "/calculators/squareness")}>
+              {t("home.hero.check")}
             </ButtonLink>
           </div>
         </div>

@@ -6,6 +6,7 @@ import { useTranslate } from "@/lib/client/i18n/messages-context";
 
 const links = [
   { path: "/calculators", label: "common.nav.calculators" },
+  { path: "/set", label: "common.nav.sets" },
   { path: "/developers", label: "common.nav.api" },
 ] as const;
 

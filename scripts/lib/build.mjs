@@ -10,7 +10,7 @@ import { run } from "./run.mjs";
 /** All that a build is made from; a change to anything else leaves it fresh. */
 export const SOURCES = [
   "api-spec", "app", "calculators", "components", "lib", "models", "public", "package-lock.json", "next.config.mjs", "tsconfig.json",
-  "tailwind.config.ts", "postcss.config.mjs", "proxy.ts", "instrumentation.ts", "scripts/lib/build.mjs", "scripts/lib/csp.mjs",
+  "tailwind.config.ts", "postcss.config.mjs", "proxy.ts", "instrumentation.ts", "scripts/lib/build.mjs", "scripts/lib/csp.mjs", "scripts/lib/service-worker.mjs",
 ];
 const stampFile = (root) => path.join(root, ".next", "sillwright-build.json");
 
@@ -84,10 +84,13 @@ export async function build(root, { force = false, show = false } = {}) {
     // Next leaves these out of the standalone folder, and files added after the start would not be served.
     if (existsSync(path.join(root, "public"))) cpSync(path.join(root, "public"), path.join(standalone, "public"), { recursive: true });
     cpSync(path.join(root, ".next", "static"), path.join(standalone, ".next", "static"), { recursive: true });
+    // By now the packages are there; this file is read before they are.
+    const { writeServiceWorker } = await import("./service-worker.mjs");
+    const kept = await writeServiceWorker(root, path.join(root, ".next"), path.join(standalone, "public"));
     // Next copies .env files along; the site gets its environment from whoever starts it.
     for (const file of readdirSync(standalone)) if (file.startsWith(".env")) rmSync(path.join(standalone, file));
     writeFileSync(stampFile(root), JSON.stringify({ hash, pages }));
-    return `built, ${pages} static pages with their own policy`;
+    return `built, ${pages} static pages with their own policy, ${kept.files} files (${kept.kilobytes} kB) for use without signal`;
   } finally {
     release();
   }

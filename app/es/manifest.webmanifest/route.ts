@@ -1,0 +1,5 @@
+import { webManifest } from "@/components/site/web-manifest";
+
+export const dynamic = "force-static";
+
+export const GET = () => webManifest("es");
