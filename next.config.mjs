@@ -53,6 +53,14 @@ const config = {
           { key: "Cross-Origin-Opener-Policy", value: "same-origin" },
         ],
       },
+      // Whoever has the address of a kept calculation can read it.
+      ...["/c/:id", "/es/c/:id"].map((source) => ({
+        source,
+        headers: [
+          { key: "Referrer-Policy", value: "no-referrer" },
+          { key: "X-Robots-Tag", value: "noindex, nofollow" },
+        ],
+      })),
       // A stale worker would keep a phone on an old edition of the site.
       { source: "/sw.js", headers: [{ key: "Cache-Control", value: "no-cache" }] },
     ];

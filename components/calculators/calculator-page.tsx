@@ -31,7 +31,7 @@ export function CalculatorPage({ locale, calculator, showMeDrawing, children }: 
   const namespace = name as Namespace;
   const t = getTranslate(locale, ["common", "cautions", namespace]);
   const cautionKeys = calculator.cautions.map((code) => `cautions.${code}`);
-  const messages = { ...clientMessages(locale, namespace), ...loadMessages(locale, ["errors"]), ...loadMessages(locale, ["cautions"], cautionKeys) };
+  const messages = { ...clientMessages(locale, namespace), ...loadMessages(locale, ["errors"]), ...loadMessages(locale, ["links"], ["links.send"]), ...loadMessages(locale, ["cautions"], cautionKeys) };
   const header = (
     <>
       <h1>{t(`${name}.page.title`)}</h1>

@@ -1,0 +1,89 @@
+import { queryFromInput } from "@/calculators/schema/query";
+import { publishedRuleTexts, ruleIds } from "@/calculators/rules";
+import type { Translate } from "@/lib/client/i18n/translate";
+
+/** One line of a kept calculation: what it is, and its value as text. */
+export interface SummaryRow {
+  path: string;
+  label: string;
+  text: string;
+}
+
+/** The figures of an answer that a reader looks for first; `[]` goes through a list. Others are in the calculator, one tap away. */
+const headlines: Readonly<Record<string, readonly string[]>> = {
+  squareness: ["shape", "verdict", "difference", "rack.distance", "rack.toward", "target.diagonal", "target.reading", "taper.length", "taper.width"],
+  corners: ["diagonal", "reading", "triangle.a", "triangle.b", "triangle.c"],
+  insets: ["lines.ab", "lines.bc", "lines.cd", "lines.da", "diagonal", "reading", "drop", "drops.ac", "drops.bd"],
+  "anchors/layout": ["bolts", "pieces[].count", "pieces[].spacing", "pieces[].stations"],
+  "anchors/check": ["ok", "findings[].code", "additions[].station"],
+  conversions: ["total", "feetInches", "inches", "decimalFeet", "millimetres", "metres", "spacing.each"],
+};
+
+/** Without a list of its own an answer is shown by its first lengths and words. */
+const mostUnlisted = 16;
+
+export function inputRows(input: object, t: Translate): SummaryRow[] {
+  return [...queryFromInput(input)].map(([path, value]) => ({ path, label: labelOf(path, t), text: wordOf(value, t) }));
+}
+
+export function answerRows(operation: string, answer: Record<string, unknown>, t: Translate): SummaryRow[] {
+  const listed = headlines[operation];
+  const found = listed === undefined ? unlisted(answer).slice(0, mostUnlisted) : listed.flatMap((path) => valuesAt(answer, path.split("."), ""));
+  return found.flatMap(({ path, value }) => {
+    const text = textOf(value, t);
+    return text === null ? [] : [{ path, label: labelOf(path, t), text }];
+  });
+}
+
+interface Found {
+  path: string;
+  value: unknown;
+}
+
+function valuesAt(value: unknown, [step, ...rest]: readonly string[], above: string): Found[] {
+  if (step === undefined || value === null || value === undefined) return [{ path: above.slice(1), value }];
+  const through = step.endsWith("[]");
+  const name = through ? step.slice(0, -2) : step;
+  const next = (value as Record<string, unknown>)[name];
+  if (!through) return valuesAt(next, rest, `${above}.${name}`);
+  return Array.isArray(next) ? next.flatMap((item, index) => valuesAt(item, rest, `${above}.${name}.${index}`)) : [];
+}
+
+function unlisted(value: unknown, above = ""): Found[] {
+  if (value === null || typeof value !== "object" || isPrinted(value)) return typeof value === "number" ? [] : [{ path: above.slice(1), value }];
+  return Object.entries(value).flatMap(([name, item]) => unlisted(item, `${above}.${name}`));
+}
+
+const isPrinted = (value: object): value is { text: string; lean?: string } => typeof (value as { text?: unknown }).text === "string";
+
+function textOf(value: unknown, t: Translate): string | null {
+  if (value === null || value === undefined) return null;
+  if (Array.isArray(value)) return value.length === 0 ? null : value.map((item) => textOf(item, t) ?? "").join(", ");
+  if (typeof value !== "object") return wordOf(String(value), t);
+  if (!isPrinted(value)) return null;
+  return value.lean === undefined || value.lean === "exact" ? value.text : `${value.text} ${t(`common.lean.${value.lean}`)}`;
+}
+
+/** A code in words where it has some, a rule by its title, anything else as it is. */
+function wordOf(value: string, t: Translate): string {
+  const rule = ruleIds.find((id) => id === value);
+  if (rule !== undefined) return publishedRuleTexts[rule].title ?? rule;
+  return t.has(`links.values.${value}`) ? t(`links.values.${value}`) : value;
+}
+
+/** `diagonals.ac` is “Diagonals, AC”, `bolts.0.station` “Bolts 1, Station”. */
+function labelOf(path: string, t: Translate): string {
+  const words: string[] = [];
+  for (const step of path.split(".")) {
+    const last = words.at(-1);
+    if (/^\d+$/.test(step)) words[words.length - 1] = last === undefined ? step : t("links.numbered", { word: last, number: Number(step) + 1 });
+    else words.push(stepWord(step, t));
+  }
+  return words.reduce((first, second) => t("links.both", { first, second }));
+}
+
+/** Corners and sides are named by their letters. */
+export function stepWord(step: string, t: Translate): string {
+  if (/^([A-H]|[a-h]{2})$/.test(step)) return step.toUpperCase();
+  return t.has(`links.words.${step}`) ? t(`links.words.${step}`) : step;
+}
