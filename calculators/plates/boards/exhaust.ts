@@ -1,4 +1,4 @@
-import type { BoardKind, BoardPlan, GoOn } from "./board-problem";
+import type { BoardKind, GoOn } from "./board-problem";
 import { Packing, type SlidingJoint } from "./packing";
 
 interface ExhaustOptions {
