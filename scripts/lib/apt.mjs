@@ -41,19 +41,22 @@ export async function ensureSystemPackages(names, { find = findProgram, execute 
     throw new Failure(`${packages.join(" and ")} missing, and this machine has no apt: install them with its own package manager, or set DATABASE_URL and UPSTASH_REDIS_REST_URL to servers you have, and start again.`);
   const prefix = await rootPrefix({ find, execute, userId, list });
   const execPrefixed = (...command) => execute(...asRoot(prefix, command));
-
   const quiet = !existsSync(policy);
   if (quiet) await execPrefixed("sh", "-c", `printf '#!/bin/sh\\nexit 101\\n' > ${policy} && chmod 755 ${policy}`);
   try {
     const install = ["env", "DEBIAN_FRONTEND=noninteractive", "apt-get", "install", "-y", "--no-install-recommends", "-o", "DPkg::Lock::Timeout=120", ...packages];
     let result = await execPrefixed(...install);
+    if (/dpkg --configure -a/.test(result.output)) {
+      await execPrefixed("dpkg", "--configure", "-a"); // an installation that was cut short has to be finished first
+      result = await execPrefixed(...install);
+    }
     if (result.code !== 0) {
       const update = await execPrefixed("apt-get", "update"); // A fresh machine has no package lists, an old one stale ones.
       result = update.code === 0 ? await execPrefixed(...install) : update;
     }
     if (result.code !== 0) throw aptFailure(result.output, list);
   } finally {
-    if (quiet) await execPrefixed("rm", "-f", policy);
+    if (quiet) await execute(...asRoot(prefix, ["rm", "-f", policy]), { putsBack: true });
   }
   return `installed ${list}`;
 }

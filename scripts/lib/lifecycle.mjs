@@ -1,5 +1,6 @@
-import { report } from "./steps.mjs";
+import { stopServices } from "./processes.mjs";
 import { stopRunning } from "./run.mjs";
+import { report } from "./steps.mjs";
 
 /**
  * Runs a script's whole work and sees to it that nothing it started outlives it: not on success, not on failure, not on Ctrl-C.
@@ -11,7 +12,8 @@ export async function lifecycle(work) {
   let stopping;
   const stopAll = () =>
     (stopping ??= (async () => {
-      stopRunning();
+      await stopRunning();
+      await stopServices(); // Those that are not ready yet are nobody's to keep, and must end too.
       for (const thing of kept.reverse()) {
         try {
           await thing.stop();

@@ -64,6 +64,15 @@ const tail = (file, lines = 25) => {
   }
 };
 
+const live = new Set();
+let stopped = false;
+
+/** Ends every service that is still up, the last begun first, and lets no other begin. */
+export async function stopServices() {
+  stopped = true;
+  for (const service of [...live].reverse()) await service.stop();
+}
+
 const WRITE_DOWN = `
 read -r stat < /proc/$$/stat
 read -r boot < /proc/sys/kernel/random/boot_id
@@ -84,6 +93,7 @@ export const writingItselfDown = (recordFile, leftovers, command, args) => ["/bi
  * @param {{ name: string, command: string, args: string[], env?: NodeJS.ProcessEnv, cwd?: string, runDir: string, logDir: string, within?: number, leftovers?: string[] }} what
  */
 export function startService({ name, command, args, env = process.env, cwd, runDir, logDir, within = 10_000, leftovers = [] }) {
+  if (stopped) throw new Failure(`${name} is not begun, since everything is being stopped.`);
   mkdirSync(runDir, { recursive: true });
   mkdirSync(logDir, { recursive: true });
   const logFile = path.join(logDir, `${name}.log`);
@@ -96,6 +106,7 @@ export function startService({ name, command, args, env = process.env, cwd, runD
   const exited = new Promise((resolve) => {
     const done = (reason) => {
       service.ended = true;
+      live.delete(service);
       rmSync(recordFile, { force: true });
       resolve(reason);
     };
@@ -111,6 +122,7 @@ export function startService({ name, command, args, env = process.env, cwd, runD
     for (const folder of leftovers) rmSync(folder, { recursive: true, force: true });
   };
   const service = { name, pid: child.pid, logFile, ended: false, stopping: false, tail: () => tail(logFile), exited, stop };
+  live.add(service);
   return service;
 }
 

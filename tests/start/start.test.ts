@@ -105,6 +105,16 @@ describe("npm start", () => {
     expect(recorded(folder)).toHaveLength(4);
   });
 
+  test("leaves nothing behind at whatever moment of its start Ctrl-C comes", async () => {
+    for (let time = 0; time < runs(3); time += 1) {
+      const interrupted = start();
+      await interrupted.until(() => interrupted.output.includes("Disk"));
+      await pause(Math.random() * 2_500);
+      expect(await interrupted.end("SIGINT")).toBe(130);
+      expect([processesOf(folder), recorded(folder)]).toEqual([[], []]);
+    }
+  });
+
   test("never ends a process that only has the pid of one that was ours", async () => {
     const first = await start().running();
     await first.end("SIGTERM");

@@ -73,6 +73,11 @@ describe("what a killed start left", () => {
   });
 });
 
+test("a command that does not listen is ended by force when its time is up", { timeout: 15_000 }, async () => {
+  const { code, killed } = await run("sh", ["-c", "trap '' TERM; sleep 30 & wait; sleep 30"], { signal: AbortSignal.timeout(300) });
+  expect([code, killed]).toEqual([1, "SIGKILL"]);
+});
+
 test("a command's code and output are answered, and a program that is not there has the code a shell gives", async () => {
   expect(await run("sh", ["-c", "echo a; echo b >&2; exit 4"])).toEqual({ code: 4, killed: null, output: expect.stringMatching(/a\nb|b\na/) });
   expect((await run("no-such-program", [])).code).toBe(127);
