@@ -1,6 +1,7 @@
 "use client";
 
 import { useId } from "react";
+import { Concrete } from "@/components/drawing/plan-parts";
 import { useTranslate } from "@/lib/client/i18n/messages-context";
 import { alongWall, frameOf, planOf, type Pair } from "@/lib/client/set/plan-layers";
 import type { SillSet } from "@/lib/client/set/schema";
@@ -38,7 +39,7 @@ export function SetPlan({ set, stages }: { set: SillSet; stages: readonly Stage[
       <svg className="plan" viewBox={`0 0 ${box} ${frame.height}`} role="img" aria-labelledby={`${id}-t ${id}-d`}>
         <title id={`${id}-t`}>{t("set.plan.title")}</title>
         <desc id={`${id}-d`}>{t("set.plan.description", { layers: layers.join(", ") })}</desc>
-        <polygon points={path(frame.slab)} fill="var(--concrete)" stroke="var(--edge-strong)" strokeWidth="2" />
+        <Concrete id={`${id}-c`} points={frame.slab.map(([x, y]) => ({ x, y }))} />
         {plan.pieces?.map(({ wall, from, to }, index) => (
           <polygon key={index} points={path([at(wall, from, 0), at(wall, to, 0), at(wall, to, plateDepth), at(wall, from, plateDepth)])} fill="var(--timber)" stroke="var(--timber-edge)" strokeWidth="1.2" />
         ))}

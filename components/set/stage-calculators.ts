@@ -7,6 +7,8 @@ type StageCalculator = ComponentType<{ header: ReactNode }>;
 /** The calculators' own pieces by folder name, each fetched with its stage. A test fails while one with a stage is missing here. */
 export const stageCalculators: Readonly<Record<string, () => Promise<StageCalculator>>> = {
   squareness: () => import("@/components/calculators/squareness/squareness-calculator").then((module) => module.SquarenessCalculator),
+  footprint: () => import("@/components/calculators/footprint/footprint-calculator").then((module) => module.FootprintCalculator),
   inset: () => import("@/components/calculators/inset/inset-calculator").then((module) => module.InsetCalculator),
+  fit: () => import("@/components/calculators/fit/fit-calculator").then((module) => module.FitCalculator),
   anchors: () => import("@/components/calculators/anchors/anchors-calculator").then((module) => module.AnchorsCalculator),
 };

@@ -55,6 +55,10 @@ export function stageFormStore(store: SetStore, setId: string, slotId: string, {
     store.change(setId, { calculations: { [slotId]: whole } }, quietly ? undefined : { what: count > 1 && before !== undefined && Object.keys(next.fields).length < Object.keys(before.fields).length ? "row" : "typing", slot: slotId });
   }
 
+  // What was carried in came without the page's own first choices: they join it while nothing has been typed.
+  const begun = stored();
+  if (begun !== undefined && begun.result === null && Object.entries(begun.fields).every(([name, text]) => begun.taken[name] === text)) change({ ...formOf(begun), fields: { ...defaults, ...begun.fields } }, true);
+
   return {
     get,
     getInitial: () => initial,
