@@ -1,6 +1,8 @@
 import { anchors } from "./anchors";
 import { conversions } from "./conversions";
 import { corner } from "./corner";
+import { fit } from "./fit";
+import { footprint } from "./footprint";
 import { inset } from "./inset";
 import type { Calculator, Operation } from "./schema";
 import { squareness } from "./squareness";
@@ -8,8 +10,10 @@ import { squareness } from "./squareness";
 /** Every calculator, in the order of the job. Pages, API, OpenAPI, short links and tests read this list. */
 export const calculators: readonly Calculator[] = [
   squareness,
+  footprint,
   corner,
   inset,
+  fit,
   anchors,
   conversions,
 ];

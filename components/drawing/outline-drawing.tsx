@@ -62,7 +62,7 @@ export function OutlineDrawing({ slab, chalk = null, truth = "slab", names, side
           );
         })}
         {concrete.map((corner, index) => (
-          <SideText key={names[index]} from={corner} to={around(concrete, index + 1)} text={sides[index] ?? ""} />
+          <SideText key={names[index]} from={corner} to={around(concrete, index + 1)} text={sides[index] ?? ""} inside={[index, index + 1].map((end) => isInside(around(concrete, end - 1), around(concrete, end), around(concrete, end + 1))) as [boolean, boolean]} />
         ))}
       </svg>
       <figcaption className="plan-caption">
@@ -76,10 +76,18 @@ export function OutlineDrawing({ slab, chalk = null, truth = "slab", names, side
 /** About how wide a figure of the small text is, in pixels. */
 const figureWidth = 8.2;
 
-function SideText({ from, to, text }: { from: Point; to: Point; text: string }) {
+/** On paper a counter-clockwise plan turns the other way: right turns are its inside corners. */
+function isInside(before: Point, at: Point, after: Point): boolean {
+  return (at.x - before.x) * (after.y - at.y) - (at.y - before.y) * (after.x - at.x) > 0;
+}
+
+/** A side's figure at its middle, moved a little off an inside corner, whose letter stands on the same side. */
+function SideText({ from, to, text, inside }: { from: Point; to: Point; text: string; inside: readonly [boolean, boolean] }) {
   const length = Math.hypot(to.x - from.x, to.y - from.y);
-  if (text === "" || length < text.length * figureWidth + 22) return null;
-  const middle = between(from, to, 0.5);
+  const crowded = inside.filter(Boolean).length;
+  if (text === "" || length < text.length * figureWidth + 22 + 8 * crowded) return null;
+  const shift = (inside[0] ? 8 : 0) - (inside[1] ? 8 : 0);
+  const middle = between(from, to, 0.5 + shift / length);
   const out = outward(from, to);
   const upright = Math.abs(to.y - from.y) > Math.abs(to.x - from.x);
   const off = 15;

@@ -73,10 +73,31 @@ function ConversionsTile() {
   );
 }
 
+function FootprintTile() {
+  return (
+    <Tile>
+      <path d="M16 80V12h66v28h52v40z" {...slab} />
+      <path d="M134 80 82 40 16 80M16 12l66 28" {...chalk} strokeWidth="2.4" strokeDasharray="8 4" />
+    </Tile>
+  );
+}
+
+function FitTile() {
+  return (
+    <Tile>
+      <polygon points="14,76 138,82 132,10 20,16" {...slab} />
+      <rect x="26" y="22" width="98" height="48" {...chalk} strokeWidth="3" />
+      <path d="M44 78v-8M106 80V70M18 46h8" stroke="var(--keel)" strokeWidth="2.6" />
+    </Tile>
+  );
+}
+
 const tiles: Readonly<Record<string, () => ReactNode>> = {
   squareness: SquarenessTile,
+  footprint: FootprintTile,
   corner: CornerTile,
   inset: InsetTile,
+  fit: FitTile,
   anchors: AnchorsTile,
   conversions: ConversionsTile,
 };

@@ -18,7 +18,7 @@ export function CheckTable({ answer, burned }: Part & { burned: boolean }) {
   const hasChalk = checks.some(({ chalk }) => chalk !== null);
   const figure = (length: { text: string }, reading: { text: string }) => <LengthText text={(burned ? reading : length).text} />;
   return (
-    <Section id="checks" title={t("footprint.checks.title")} intro={t(burned ? "footprint.checks.introBurned" : "footprint.checks.intro")} head={[t("footprint.checks.pull"), t("footprint.checks.fixes"), t("footprint.checks.slab"), ...(hasChalk ? [t("footprint.checks.chalk")] : [])]}>
+    <Section id="checks" figures={[2, 4]} title={t("footprint.checks.title")} intro={t(burned ? "footprint.checks.introBurned" : "footprint.checks.intro")} head={[t("footprint.checks.pull"), t("footprint.checks.fixes"), t("footprint.checks.slab"), ...(hasChalk ? [t("footprint.checks.chalk")] : [])]}>
       {checks.map(({ from, to, fixes, length, reading, chalk }) => (
         <tr key={from + to}>
           <th scope="row">
@@ -40,7 +40,7 @@ export function LineTable({ answer }: Part) {
   const hasToward = lines.some(({ toward }) => toward !== null);
   const hasChalk = lines.some(({ chalk }) => chalk !== null);
   return (
-    <Section id="lines" title={t("footprint.lines.title")} intro={t("footprint.lines.intro")} head={[t("footprint.lines.side"), ...(hasToward ? [t("footprint.lines.toward")] : []), t("footprint.lines.slab"), ...(hasChalk ? [t("footprint.lines.chalk")] : []), t("footprint.lines.middle")]}>
+    <Section id="lines" figures={[hasToward ? 2 : 1, 5]} title={t("footprint.lines.title")} intro={t("footprint.lines.intro")} head={[t("footprint.lines.side"), ...(hasToward ? [t("footprint.lines.toward")] : []), t("footprint.lines.slab"), ...(hasChalk ? [t("footprint.lines.chalk")] : []), t("footprint.lines.middle")]}>
       {lines.map(({ side, toward, length, chalk, middle }) => (
         <tr key={side}>
           <th scope="row">{spokenSide(side)}</th>
@@ -71,7 +71,7 @@ export function CornerTable({ answer }: Part) {
   if (corners.length === 0) return null;
   const hasChalk = corners.some(({ chalk }) => chalk !== null);
   return (
-    <Section id="corners" title={t("footprint.corners.title")} intro={t(hasChalk ? "footprint.corners.intro" : "footprint.corners.introBare")} head={[t("footprint.corners.corner"), t("footprint.corners.kind"), t("footprint.corners.angle"), ...(hasChalk ? [t("footprint.corners.fromCorner")] : [])]}>
+    <Section id="corners" figures={[2, 4]} title={t("footprint.corners.title")} intro={t(hasChalk ? "footprint.corners.intro" : "footprint.corners.introBare")} head={[t("footprint.corners.corner"), t("footprint.corners.kind"), t("footprint.corners.angle"), ...(hasChalk ? [t("footprint.corners.fromCorner")] : [])]}>
       {corners.map(({ name, inside, angleDegrees, chalk }) => (
         <tr key={name}>
           <th scope="row">{name}</th>
@@ -92,7 +92,7 @@ export function BowTable({ answer }: Part) {
   const t = useTranslate();
   if (answer.bows.length === 0) return null;
   return (
-    <Section id="bows-found" title={t("footprint.bowed.title")} intro={t("footprint.bowed.intro")} head={[t("footprint.bowed.side"), t("footprint.bowed.station"), t("footprint.bowed.outward"), t("footprint.bowed.toChalk")]}>
+    <Section id="bows-found" figures={[1, 4]} title={t("footprint.bowed.title")} intro={t("footprint.bowed.intro")} head={[t("footprint.bowed.side"), t("footprint.bowed.station"), t("footprint.bowed.outward"), t("footprint.bowed.toChalk")]}>
       {answer.bows.map(({ side, station, outward, toChalk }, index) => (
         <tr key={index}>
           <th scope="row">{spokenSide(side)}</th>
@@ -109,18 +109,18 @@ export function BowTable({ answer }: Part) {
   );
 }
 
-/** A titled table whose first column names the row; the others are figures unless a cell says otherwise. */
-export function Section({ id, title, intro, head, children }: { id: string; title: string; intro: string; head: readonly string[]; children: ReactNode }) {
+/** A titled table whose first column names the row; `figures` says which columns hold figures, up to but not with the second number. */
+export function Section({ id, title, intro, head, figures, children }: { id: string; title: string; intro: string; head: readonly string[]; figures: readonly [from: number, to: number]; children: ReactNode }) {
   return (
     <section aria-labelledby={`${id}-title`}>
       <h2 id={`${id}-title`}>{title}</h2>
       <p>{intro}</p>
       <div className="overflow-x-auto">
-        <table className="data-table">
+        <table className="data-table plan-table">
           <thead>
             <tr>
-              {head.map((text) => (
-                <th key={text} scope="col">
+              {head.map((text, index) => (
+                <th key={text} scope="col" className={index >= figures[0] && index < figures[1] ? "figure" : undefined}>
                   {text}
                 </th>
               ))}

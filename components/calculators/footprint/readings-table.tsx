@@ -13,7 +13,7 @@ export function ReadingsTable({ answer }: { answer: FootprintAnswer }) {
   if (adjustment === null) return null;
   return (
     <Disclosure summary={t("footprint.adjusted.summary")}>
-      <Section id="adjusted" title={t("footprint.adjusted.title")} intro={t("footprint.adjusted.intro", { closure: adjustment.closureIn.toFixed(3), limit: adjustment.limitIn.toFixed(3) })} head={[t("footprint.adjusted.pull"), t("footprint.adjusted.measured"), t("footprint.adjusted.adjusted"), t("footprint.adjusted.change")]}>
+      <Section id="adjusted" figures={[1, 4]} title={t("footprint.adjusted.title")} intro={t("footprint.adjusted.intro", { closure: adjustment.closureIn.toFixed(3), limit: adjustment.limitIn.toFixed(3) })} head={[t("footprint.adjusted.pull"), t("footprint.adjusted.measured"), t("footprint.adjusted.adjusted"), t("footprint.adjusted.change")]}>
         {adjustment.readings.map(({ from, to, measured, adjusted, residualIn }, index) => (
           <tr key={index}>
             <th scope="row">

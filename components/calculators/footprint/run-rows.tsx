@@ -73,7 +73,7 @@ function RunRow({ form, row }: { form: PlanForm; row: number }) {
           error={form.errorAt(`runs.${row}.toward`)}
         />
       ) : null}
-      <div className="plan-pair">
+      <div className="plan-pair plan-run">
         <LengthField {...form.field(`runs.${row}.length`)} label={t("footprint.runs.length", { number })} />
         <TextField name={`runs.${row}.times`} label={t("footprint.runs.times", { number })} inputMode="numeric" value={form.value(`runs.${row}.times`)} onChange={(text) => form.set(`runs.${row}.times`, text)} error={form.errorAt(`runs.${row}.times`)} />
       </div>

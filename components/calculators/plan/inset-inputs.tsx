@@ -30,14 +30,16 @@ export function InsetInputs({ form, namespace, sides }: { form: PlanForm; namesp
   return (
     <>
       <LengthField {...form.field("inset")} label={t(`${namespace}.inset.label`)} hint={t(`${namespace}.inset.hint`)} />
-      <Segmented
-        name="preset"
-        legend={t(`${namespace}.inset.preset`)}
-        legendIs="hidden"
-        value={typed === "" ? form.value("preset") : chosen}
-        onChange={(preset) => form.change({ preset: "", inset: preset })}
-        options={insetPresets.map((preset) => ({ value: preset, label: <LengthText text={preset.replace(" in", '"')} />, spoken: preset }))}
-      />
+      <div className="plan-presets">
+        <Segmented
+          name="preset"
+          legend={t(`${namespace}.inset.preset`)}
+          legendIs="hidden"
+          value={typed === "" ? form.value("preset") : chosen}
+          onChange={(preset) => form.change({ preset: "", inset: preset })}
+          options={insetPresets.map((preset) => ({ value: preset, label: <LengthText text={preset.replace(" in", '"')} />, spoken: preset }))}
+        />
+      </div>
       <Disclosure summary={t(`${namespace}.inset.each`)} open={sides.some((side) => form.value(`each.${side}`) !== "")}>
         <p>{t(`${namespace}.inset.eachHint`)}</p>
         {sides.map((side) => (
