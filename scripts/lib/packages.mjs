@@ -1,5 +1,4 @@
-import { createHash } from "node:crypto";
-import { existsSync, readFileSync, writeFileSync } from "node:fs";
+import { existsSync, readFileSync } from "node:fs";
 import path from "node:path";
 import { diskFull, Failure } from "./failure.mjs";
 import { NOT_FOUND, run } from "./run.mjs";
@@ -8,20 +7,14 @@ const readJson = (file) => JSON.parse(readFileSync(file, "utf8"));
 
 /** Whether node_modules holds exactly what package-lock.json names for this machine. */
 export function packagesCurrent(root) {
-  const lockFile = path.join(root, "package-lock.json");
-  const stampFile = path.join(root, "node_modules", ".sillwright-lock");
-  const hiddenFile = path.join(root, "node_modules", ".package-lock.json"); // npm's own list, written when an install is complete
-  if (!existsSync(hiddenFile)) return false;
-  const hash = createHash("sha256").update(readFileSync(lockFile)).digest("hex");
-  if (existsSync(stampFile) && readFileSync(stampFile, "utf8") === hash) return true;
-  const wanted = readJson(lockFile).packages;
-  const present = readJson(hiddenFile).packages;
-  const same = Object.entries(wanted).every(([name, { version, optional, link }]) => {
+  const list = path.join(root, "node_modules", ".package-lock.json"); // npm's own, written when an installation is complete
+  if (!existsSync(list)) return false;
+  const wanted = readJson(path.join(root, "package-lock.json")).packages;
+  const present = readJson(list).packages;
+  return Object.entries(wanted).every(([name, { version, optional, link }]) => {
     if (name === "" || link) return true;
     return present[name] ? present[name].version === version : Boolean(optional);
   });
-  if (same) writeFileSync(stampFile, hash);
-  return same;
 }
 
 /** Installs the packages of package-lock.json unless they are there. @throws Failure that says what to do. */
@@ -32,7 +25,6 @@ export async function ensurePackages(root, { execute = run } = {}) {
   const { code, output } = await execute("npm", ["ci", "--no-audit", "--no-fund"], { cwd: root, env });
   if (code === NOT_FOUND) throw new Failure("npm is not on this machine: install it with Node (nodejs.org) and start again.");
   if (code !== 0) throw packagesFailure(output, root);
-  packagesCurrent(root);
   return "installed";
 }
 
