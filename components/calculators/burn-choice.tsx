@@ -4,7 +4,7 @@ import { LengthField, type LengthFieldProps } from "@/components/length-field/le
 import { Segmented } from "@/components/ui/segmented";
 import { fieldId } from "@/lib/client/calculator/field-id";
 import { useTranslate } from "@/lib/client/i18n/messages-context";
-import { burnChosen, burns, other } from "./burn-field";
+import { burnChosen, burnName, burns, other } from "./burn-field";
 
 interface BurnChoiceProps {
   form: {
@@ -22,7 +22,7 @@ interface BurnChoiceProps {
 export function BurnChoice({ form, namespace }: BurnChoiceProps) {
   const t = useTranslate();
   const { choice, text } = burnChosen(form.value, form.unit);
-  const label = (value: string) => (value === "0" ? t(`${namespace}.burn.end`) : value === other ? t(`${namespace}.burn.other`) : value);
+  const label = (value: string) => (value === "0" ? t(`${namespace}.burn.end`) : value === other ? t(`${namespace}.burn.other`) : burnName(value, t, namespace));
   return (
     <div className="field with-other">
       <Segmented

@@ -12,6 +12,14 @@ export function burnChosen(value: Value, unit: string): { choice: string; text: 
   return known === undefined ? { choice: other, text: burn } : { choice: known, text: known === "0" ? "" : known };
 }
 
+const names: Readonly<Record<string, string>> = { "1 in": "inch", "1 ft": "foot", "100 mm": "hundred" };
+
+/** A burn in the page's language; one that is none of the marks as it was typed. The messages are under `<namespace>.burn`. */
+export function burnName(text: string, t: (key: string) => string, namespace: string): string {
+  const name = names[text];
+  return name === undefined ? text : t(`${namespace}.burn.${name}`);
+}
+
 /** The page's input with its burn as the API takes it. */
 export function withBurn({ burn, burnOther, ...rest }: Record<string, unknown>): Record<string, unknown> {
   const held = burn === other ? burnOther : burn;

@@ -50,11 +50,11 @@ export function Dimension({ from, to, text, off = 30 }: { from: Point; to: Point
   const middle = between(from, to, 0.5);
   const stands = Math.abs(to.y - from.y) > Math.abs(to.x - from.x);
   return stands ? (
-    <text transform={`translate(${middle.x - off + 8} ${middle.y}) rotate(-90)`} textAnchor="middle" className="num">
+    <text transform={`translate(${middle.x - off + 8} ${middle.y}) rotate(-90)`} textAnchor="middle" className="num halo">
       {text}
     </text>
   ) : (
-    <text x={middle.x} y={middle.y + off + 4} textAnchor="middle" className="num">
+    <text x={middle.x} y={middle.y + off + 4} textAnchor="middle" className="num halo">
       {text}
     </text>
   );

@@ -9,7 +9,7 @@ import { useCalculator, type Initial } from "@/lib/client/calculator/use-calcula
 import { useTranslate } from "@/lib/client/i18n/messages-context";
 import { countsInches, inInches } from "@/components/length-field/tape-style";
 import { BurnChoice } from "../burn-choice";
-import { burnChosen, withBurn } from "../burn-field";
+import { burnChosen, burnName, withBurn } from "../burn-field";
 import { CalculatorWorkspace } from "../calculator-workspace";
 import { CornerDrawing } from "./corner-drawing";
 import { blankLegs, isLengthField } from "./corner-fields";
@@ -22,6 +22,7 @@ export function CornerCalculator({ header, initial }: { header: ReactNode; initi
   const blank = blankLegs(form.value);
   const answer = blank.length === 0 ? form.answer : null;
   const burn = burnChosen(form.value, form.unit).text;
+  const held = burnName(burn, t, "corner");
   const print = countsInches(form.value("legs.0")) ? inInches : (text: string) => text;
   const missing = form.asked === 0 ? [] : blank;
   const errorAt = (name: string) => (missing.includes(name) ? t("errors.required") : form.errorAt(name));
@@ -40,8 +41,8 @@ export function CornerCalculator({ header, initial }: { header: ReactNode; initi
           <BurnChoice form={form} namespace="corner" />
         </>
       }
-      verdict={<CornerVerdict answer={answer} burn={burn} print={print} />}
-      results={answer === null ? null : <CornerResults answer={answer} burn={burn} print={print} />}
+      verdict={<CornerVerdict answer={answer} burn={held} print={print} />}
+      results={answer === null ? null : <CornerResults answer={answer} burn={held} print={print} />}
       carries={answer === null ? [] : [{ href: calculatorAddress(t.locale, "squareness", { length: `${answer.legs.first.exact} in`, width: `${answer.legs.second.exact} in`, burn }), label: t("corner.carry.check") }]}
     />
   );

@@ -21,7 +21,8 @@ export function CornerVerdict({ answer, burn, print }: Omit<Shown, "answer"> & {
   if (answer === null) return <Verdict tone="idle" title={t("corner.verdict.waiting")}>{t("corner.verdict.waitingBody")}</Verdict>;
   const { triangle, reading } = answer;
   return (
-    <Verdict tone="plain" title={t.rich(burn === "" ? "corner.verdict.diagonal" : "corner.verdict.reading", { reading: <LengthText text={print(reading.text)} />, burn })}>
+    <Verdict tone="plain" title={t.rich("corner.verdict.reading", { reading: <LengthText text={print(reading.text)} /> })}>
+      {burn === "" ? null : t("corner.verdict.burned", { burn })}{" "}
       {triangle === null
         ? t("corner.verdict.noTriangle")
         : t.rich("corner.verdict.triangle", { triangle: <b>{triangle.counts.join("-")}</b>, unit: triangle.unit, a: <LengthText text={triangle.a.text} />, b: <LengthText text={triangle.b.text} />, reading: <b><LengthText text={triangle.reading.text} /></b> })}

@@ -11,7 +11,7 @@ export function ReadingTable({ answer }: { answer: SquarenessAnswer }) {
   const adjusted = answer.readings.ab.adjusted !== null;
   const taped = answer.readings.ac.correctionIn !== null;
   if (!adjusted && !taped) return null;
-  const inches = (value: number) => t("squareness.table.inches", { value: Math.abs(value) < 0.0005 ? "0" : `${value > 0 ? "+" : "-"}${Math.abs(value).toFixed(3)}` });
+  const inches = (value: number) => (Math.abs(value) < 0.0005 ? "0" : `${value > 0 ? "+" : "-"}${Math.abs(value).toFixed(3)}`);
   return (
     <section aria-labelledby="readings-title">
       <h2 id="readings-title">{t("squareness.table.title")}</h2>

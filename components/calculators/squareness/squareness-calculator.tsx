@@ -6,7 +6,7 @@ import { countsInches, inInches } from "@/components/length-field/tape-style";
 import { calculatorAddress } from "@/lib/client/calculator/calculator-address";
 import { useCalculator, type Initial } from "@/lib/client/calculator/use-calculator";
 import { useTranslate } from "@/lib/client/i18n/messages-context";
-import { burnChosen, other } from "../burn-field";
+import { burnChosen, burnName, other } from "../burn-field";
 import { CalculatorWorkspace, type Carry } from "../calculator-workspace";
 import { isLengthField, prepareSquareness, pullsFourSides, toleranceChosen } from "./squareness-fields";
 import { SquarenessDrawing } from "./squareness-drawing";
@@ -31,7 +31,7 @@ export function SquarenessCalculator({ header, initial }: { header: ReactNode; i
       drawing={<SquarenessDrawing answer={answer} />}
       fields={<SquarenessInputs form={form} answer={answer} />}
       verdict={<SquarenessVerdict answer={answer} print={print} />}
-      results={answer === null ? null : <SquarenessResults answer={answer} burn={burnChosen(form.value, form.unit).text} print={print} />}
+      results={answer === null ? null : <SquarenessResults answer={answer} burn={burnName(burnChosen(form.value, form.unit).text, t, "squareness")} print={print} />}
       carries={answer === null ? [] : carriesOf(answer, form, t)}
     />
   );

@@ -7,7 +7,7 @@ import { Segmented } from "@/components/ui/segmented";
 import type { useCalculator } from "@/lib/client/calculator/use-calculator";
 import { useTranslate } from "@/lib/client/i18n/messages-context";
 import { BurnChoice } from "../burn-choice";
-import { burnChosen } from "../burn-field";
+import { burnChosen, burnName } from "../burn-field";
 import { diagonals, pullsFourSides, sides } from "./squareness-fields";
 import { TapeInputs } from "./tape-inputs";
 import { ToleranceChoice } from "./tolerance-choice";
@@ -20,7 +20,7 @@ export function SquarenessInputs({ form, answer }: { form: SquarenessForm; answe
   const four = pullsFourSides(form.value);
   const burn = burnChosen(form.value, form.unit).text;
   const burnFor = (name: string) => form.value(`burns.${name}`) || burn;
-  const asRead = (name: string) => (burnFor(name) === "" ? t("squareness.fields.asRead") : t("squareness.fields.burned", { burn: burnFor(name) }));
+  const asRead = (name: string) => (burnFor(name) === "" ? t("squareness.fields.asRead") : t("squareness.fields.burned", { burn: burnName(burnFor(name), t, "squareness") }));
   return (
     <>
       <div className="field">

@@ -13,11 +13,11 @@ const corners = ["A", "B", "C", "D"] as const;
 /** The figures behind the verdict, what the readings prove, and who is suspected when they cannot all be right. */
 export function SquarenessResults({ answer, burn, print }: { answer: SquarenessAnswer; burn: string; print: (text: string) => string }) {
   const t = useTranslate();
-  const { rack, target, taper, readings, difference } = answer;
+  const { rack, target, taper, readings, difference, verdict } = answer;
   const degrees = (value: number) => t("squareness.results.degrees", { value: value.toFixed(2) });
   const shown = taper === null ? (["A", "B"] as const) : corners;
-  const items: KeyValue[] = [
-    { label: t("squareness.results.difference"), value: <LengthAnswer length={difference} /> },
+  // Figures of a slab that cannot be are not worth reading: only how far the readings miss each other.
+  const slab: KeyValue[] = [
     { label: t("squareness.results.trueDiagonal"), value: <LengthAnswer length={target.diagonal} /> },
     ...(target.reading.text === target.diagonal.text
       ? []
@@ -30,6 +30,13 @@ export function SquarenessResults({ answer, burn, print }: { answer: SquarenessA
           { label: t("squareness.results.taperWidth"), value: <LengthAnswer length={taper.width} /> },
         ]),
     ...shown.map((corner) => ({ key: corner, label: t("squareness.results.corner", { corner }), value: degrees(answer.corners[corner].angleDegrees) })),
+  ];
+  const inches = (value: number) => t("squareness.table.inches", { value: value.toFixed(2) });
+  const items: KeyValue[] = [
+    { label: t("squareness.results.difference"), value: <LengthAnswer length={difference} /> },
+    ...(verdict === "contradictory" ? [] : slab),
+    { label: t(taper === null ? "squareness.results.closureTwo" : "squareness.results.closure"), value: inches(answer.closureIn) },
+    { label: t("squareness.results.closureLimit"), value: inches(answer.closureLimitIn) },
   ];
   return (
     <>

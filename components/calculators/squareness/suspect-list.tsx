@@ -42,7 +42,7 @@ export function SuspectList({ answer, print }: { answer: SquarenessAnswer; print
       </ul>
       {separatingPull === null ? null : (
         <>
-          <h3>{t("squareness.pull.title")}</h3>
+          <h3 className="squareness-pull">{t("squareness.pull.title")}</h3>
           <p>
             {pullSentence(separatingPull, t)} {separatingPull.kind === "triangle" ? t("squareness.pull.triangle") : null} {suspects.length > 1 && !separatingPull.separatesAll ? t("squareness.pull.notAll") : null}
           </p>
@@ -72,10 +72,14 @@ export function SuspectList({ answer, print }: { answer: SquarenessAnswer; print
   );
 }
 
-function pullSentence(pull: NonNullable<SquarenessAnswer["separatingPull"]>, t: Translate): ReactNode {
-  const place = ({ corner, toward, distance }: PullEnd) =>
-    toward === null || distance === null ? t("squareness.pull.corner", { corner }) : t.rich("squareness.pull.mark", { corner, toward, distance: <LengthText text={distance.text} /> });
-  return t.rich(pull.kind === "again" ? "squareness.pull.again" : "squareness.pull.new", { from: place(pull.from), to: place(pull.to) });
+function pullSentence({ kind, from, to }: NonNullable<SquarenessAnswer["separatingPull"]>, t: Translate): ReactNode {
+  const far = ({ distance }: PullEnd) => <LengthText text={distance?.text ?? ""} />;
+  const [first, second] = from.toward === null ? [to, from] : [from, to];
+  if (first.toward === null) return t(kind === "again" ? "squareness.pull.again" : "squareness.pull.side", { from: from.corner, to: to.corner });
+  const mark = { distance: far(first), corner: first.corner, toward: first.toward };
+  return second.toward === null
+    ? t.rich("squareness.pull.toMark", { ...mark, from: second.corner })
+    : t.rich("squareness.pull.marks", { ...mark, otherDistance: far(second), otherCorner: second.corner, otherToward: second.toward });
 }
 
 /** A-C; A-C or B-D; A-B, C-D or A-C. */

@@ -33,7 +33,12 @@ export function ToleranceChoice({ form, answer }: { form: SquarenessForm; answer
       />
       {chosen === undefined ? null : (
         <p className="field-hint squareness-allows">
-          {t("squareness.tolerance.allows", { difference: chosen.difference.text, taper: form.value("taperTolerance").trim() === "" ? chosen.taper.text : (answer?.allowed?.taper.text ?? chosen.taper.text) })} {chosen.source === null ? null : t("squareness.tolerance.source", { source: chosen.source })} {t(`common.sourceStatus.${chosen.status}`)}.
+          {t(chosen.source === null ? "squareness.tolerance.allows" : "squareness.tolerance.allowsFrom", {
+            difference: chosen.difference.text,
+            taper: (answer?.allowed?.taper ?? chosen.taper).text,
+            status: t(`common.sourceStatus.${chosen.status}`),
+            source: chosen.source ?? "",
+          })}
         </p>
       )}
       <div className="if-other">
