@@ -4,7 +4,7 @@ import { chosenFor, wallsOf, type Slot, type Stage } from "./stages";
 /** What an earlier calculation gives, or null while it has no answer. */
 export type GivesOf = (slotId: string) => Texts | null;
 
-type Taker = (gives: { concrete: Texts | null; chalk: Texts | null; bolts: (wall: string) => Texts | null; plates: Texts | null; concreteBy: string; chalkBy: string; walls: readonly string[]; fields: Texts }, slot: Slot) => Texts | null;
+type Taker = (gives: { concrete: Texts | null; chalk: Texts | null; bolts: (wall: string) => Texts | null; plates: Texts | null; concreteBy: string; chalkBy: string; walls: readonly string[] }, slot: Slot) => Texts | null;
 
 const pick = (gives: Texts, names: Readonly<Record<string, string>>): Texts =>
   Object.fromEntries(Object.entries(names).flatMap(([field, name]) => (gives[name] === undefined || gives[name] === "" ? [] : [[field, gives[name]]])));
@@ -20,7 +20,7 @@ function chalkSizes(chalk: Texts, walls: readonly string[]): Texts {
 
 /** The fields that each calculation takes from those before it, with the values they have now; null while those have no answer. */
 const takers: Readonly<Record<string, Taker>> = {
-  "chalk.inset": ({ concrete }) => concrete && (concrete.length === undefined ? {} : pick(concrete, { length: "length", width: "width", burn: "burn", "slabDiagonals.ac": "ac", "slabDiagonals.bd": "bd" })),
+  "chalk.inset": ({ concrete }) => concrete && pick(concrete, { length: "length", width: "width", burn: "burn", ...(concrete.tapered === "true" ? {} : { "slabDiagonals.ac": "ac", "slabDiagonals.bd": "bd" }) }),
   "chalk.fit": ({ concrete, concreteBy }) => {
     if (concrete === null) return null;
     if (concreteBy === "footprint") return { ...under(concrete, "corners."), ...pick(concrete, { walk: "walk" }) };
@@ -40,9 +40,10 @@ const takers: Readonly<Record<string, Taker>> = {
       ...pick(bolts(walls[0] ?? "ab") ?? {}, { rule: "rule", diameter: "diameter", plateWidth: "plateWidth" }),
     },
   "takeoff.takeoff": ({ plates }) => plates && under(plates, "takeoff."),
-  "marks.marks": ({ chalk, bolts, walls, fields }) => {
-    const wall = fields.wall ?? walls[0] ?? "ab";
-    return chalk && { ...pick(chalk, { length: `line.${wall}` }), ...Object.fromEntries(Object.entries(bolts(wall) ?? {}).flatMap(([name, text]) => (/^bolts\.\d+\.station$/.test(name) ? [[name.replace(/\.station$/, ""), text]] : []))) };
+  "marks.marks": ({ chalk, bolts, walls }) => {
+    const wall = walls[0] ?? "ab";
+    const stations = Object.entries(bolts(wall) ?? {}).filter(([name]) => /^bolts\.\d+\.station$/.test(name));
+    return chalk && { ...pick(chalk, { length: `line.${wall}` }), ...Object.fromEntries(stations) };
   },
 };
 
@@ -64,7 +65,6 @@ export function carriedInto(set: SillSet, stages: readonly Stage[], slot: Slot, 
       concreteBy,
       chalkBy,
       walls: wallsOf(set),
-      fields: set.calculations[slot.id]?.fields ?? {},
     },
     slot,
   );

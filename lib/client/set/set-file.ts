@@ -18,7 +18,7 @@ export function writeSetFile(set: SillSet): string {
 
 /** What the file is called: letters and figures of the set's name. */
 export function setFileName({ name }: SillSet): string {
-  const plain = name.normalize("NFKD").replace(/[^A-Za-z0-9]+/g, "-").replace(/^-+|-+$/g, "").toLowerCase().slice(0, 60);
+  const plain = name.normalize("NFKD").replace(/\p{M}+/gu, "").replace(/[^A-Za-z0-9]+/g, "-").replace(/^-+|-+$/g, "").toLowerCase().slice(0, 60);
   return `sillwright-${plain === "" ? "set" : plain}.json`;
 }
 

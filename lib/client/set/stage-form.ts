@@ -94,7 +94,7 @@ interface Told {
 export function keepReport({ store, setId, slot, adapter, core }: Told, { form, input, answer }: Report): void {
   const calculation = store.find(setId)?.calculations[slot.id];
   if (calculation === undefined || formOf(calculation).fields !== form.fields) return;
-  const asked = { fields: form.fields, unit: form.unit, input, wall: slot.wall };
+  const asked = { unit: form.unit, input, wall: slot.wall };
   const result: Result | null =
     answer === null ? null : { operation: adapter.operation(answer), core, input, of: fingerprint(calculation), key: adapter.key(answer), gives: adapter.gives(answer, asked), layers: adapter.layers(answer, asked) };
   if (JSON.stringify(result) === JSON.stringify(calculation.result)) return;

@@ -19,9 +19,8 @@ export interface Reading {
   text: string;
 }
 
-/** What was asked: the form as typed, the plain input, and the wall it is about. */
+/** What was asked: the plain input, what a bare number in it means, and the wall it is about. */
 export interface Asked {
-  fields: Texts;
   unit: Calculation["unit"];
   input: Readonly<Record<string, unknown>>;
   wall?: string;
@@ -33,12 +32,12 @@ export const inchText = (inches: number) => `${inches.toFixed(9).replace(/\.?0+$
 /** A length of an answer as a text that loses nothing; irrational ones to a billionth of an inch. */
 export const exactText = ({ exact, in: inches }: Pick<LengthAnswer, "exact" | "in">) => (exact === null ? inchText(inches) : `${exact} in`);
 
-/** Some of the typed lengths, by new names, with their unit written out; blank ones are left out. */
-export function typed({ fields, unit }: Asked, names: Readonly<Record<string, string>>): Texts {
+/** Some lengths of the plain input, by new names, with their unit written out; those left out stay out. */
+export function typed({ input, unit }: Asked, names: Readonly<Record<string, string>>): Texts {
   return Object.fromEntries(
-    Object.entries(names).flatMap(([name, field]) => {
-      const text = (fields[field] ?? "").trim();
-      return text === "" ? [] : [[name, meant(text, unit)]];
+    Object.entries(names).flatMap(([name, path]) => {
+      const value = path.split(".").reduce<unknown>((node, step) => (typeof node === "object" && node !== null ? (node as Record<string, unknown>)[step] : undefined), input);
+      return typeof value === "string" && value.trim() !== "" ? [[name, meant(value.trim(), unit)]] : [];
     }),
   );
 }

@@ -10,7 +10,7 @@ export const anchors: Adapter<LayoutAnswer | CheckAnswer> = {
     return keyFigure(answer.unfixable.length > 0 ? "out" : "warn", "fails", { bolts: answer.bolts.length, findings: answer.findings.length, added: answer.additions.length });
   },
   gives(answer, asked) {
-    const shared = { ...typed(asked, { diameter: "diameter", plateWidth: "plateWidth" }), ...(asked.fields.rule === undefined || asked.fields.rule === "own" ? {} : { rule: asked.fields.rule }) };
+    const shared = { ...typed(asked, { diameter: "diameter", plateWidth: "plateWidth" }), ...(typeof asked.input.rule === "string" ? { rule: asked.input.rule } : {}) };
     if (!("ok" in answer)) return { ...shared, ...Object.fromEntries(answer.pieces.flatMap(({ stations }) => stations).map((station, index) => [`bolts.${index}.station`, exactText(station)])) };
     const bolts = answer.bolts.flatMap(({ station, offset, engineered }, index): [string, string][] => [
       [`bolts.${index}.station`, exactText(station)],

@@ -3,9 +3,12 @@ import { anchors } from "./anchors";
 import { fit } from "./fit";
 import { footprint } from "./footprint";
 import { inset } from "./inset";
+import { level } from "./level";
+import { marks } from "./marks";
+import { plates } from "./plates";
 import { squareness } from "./squareness";
 
-const adapters: Readonly<Record<string, unknown>> = { squareness, footprint, inset, fit, anchors };
+const adapters: Readonly<Record<string, unknown>> = { squareness, footprint, level, inset, fit, anchors, plates, marks };
 
 /** The adapter of a calculator by its folder name; the answer given to it must be that calculator's. */
 export function adapterOf(calculator: string): Adapter<unknown> | undefined {
