@@ -14,6 +14,8 @@ const headlines: Readonly<Record<string, readonly string[]>> = {
   squareness: ["shape", "verdict", "difference", "rack.distance", "rack.toward", "target.diagonal", "target.reading", "taper.length", "taper.width"],
   corners: ["diagonal", "reading", "triangle.a", "triangle.b", "triangle.c"],
   insets: ["lines.ab", "lines.bc", "lines.cd", "lines.da", "diagonal", "reading", "drop", "drops.ac", "drops.bd"],
+  footprints: ["closure.distance", "closure.oneIn", "areaSquareFeet", "areaSquareMetres", "perimeter", "lines[].length", "checks[].reading"],
+  fits: ["worst", "fits", "overhang", "lines.ab", "lines.bc", "lines.cd", "lines.da", "checks[].reading"],
   "anchors/layout": ["bolts", "pieces[].count", "pieces[].spacing", "pieces[].stations"],
   "anchors/check": ["ok", "findings[].code", "additions[].station"],
   conversions: ["total", "feetInches", "inches", "decimalFeet", "millimetres", "metres", "spacing.each"],
@@ -30,7 +32,7 @@ export function answerRows(operation: string, answer: Record<string, unknown>, t
   const listed = headlines[operation];
   const found = listed === undefined ? unlisted(answer).slice(0, mostUnlisted) : listed.flatMap((path) => valuesAt(answer, path.split("."), ""));
   return found.flatMap(({ path, value }) => {
-    const text = textOf(value, t);
+    const text = /^findings\.\d+\.code$/.test(path) ? t(`anchors.code.${value as string}`) : textOf(value, t);
     return text === null ? [] : [{ path, label: labelOf(path, t), text }];
   });
 }
@@ -82,8 +84,8 @@ function labelOf(path: string, t: Translate): string {
   return words.reduce((first, second) => t("links.both", { first, second }));
 }
 
-/** Corners and sides are named by their letters. */
+/** Corners and sides are named by their letters; a field without a word of its own by its name, taken apart. */
 export function stepWord(step: string, t: Translate): string {
-  if (/^([A-H]|[a-h]{2})$/.test(step)) return step.toUpperCase();
-  return t.has(`links.words.${step}`) ? t(`links.words.${step}`) : step;
+  if (t.has(`links.words.${step}`)) return t(`links.words.${step}`);
+  return /^([A-Z]|[a-z]{2})$/.test(step) ? step.toUpperCase() : step.replace(/([a-z])(?=[A-Z])/g, "$1 ").toLowerCase();
 }

@@ -27,7 +27,7 @@ const kept = cache(async (id: string): Promise<LinkAnswer | "away" | null> => {
   }
 });
 
-const translateFor = (locale: Locale) => getTranslate(locale, ["common", "links"]);
+const translateFor = (locale: Locale) => getTranslate(locale, ["common", "links", "anchors"]);
 
 export async function generateMetadata({ params }: PageProps): Promise<Metadata> {
   const { locale, id } = await params;
