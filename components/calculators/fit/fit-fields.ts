@@ -1,4 +1,4 @@
-import { insetOf, isTree, withoutBlankEnd } from "../plan/inset-inputs";
+import { insetOf, isTree, withoutBlankEnd } from "../plan/plan-fields";
 
 /** Names of the page's fields beside the API's own: `slabBy` says how the slab is given, `planBy` how the wanted plan is, `each.ab` is a side's own inset. */
 export const slabWays = ["readings", "corners"] as const;

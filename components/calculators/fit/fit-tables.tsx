@@ -4,7 +4,7 @@ import type { FitAnswer } from "@/calculators/fit";
 import { LengthText } from "@/components/ui/length-text";
 import { useTranslate } from "@/lib/client/i18n/messages-context";
 import { Section } from "../footprint/footprint-tables";
-import { spokenSide } from "../plan/inset-inputs";
+import { spokenSide } from "../plan/plan-fields";
 
 interface Part {
   answer: FitAnswer;

@@ -4,7 +4,7 @@ import type { FitAnswer } from "@/calculators/fit";
 import { LengthText } from "@/components/ui/length-text";
 import { Verdict } from "@/components/ui/verdict";
 import { useTranslate } from "@/lib/client/i18n/messages-context";
-import { spokenSide } from "../plan/inset-inputs";
+import { spokenSide } from "../plan/plan-fields";
 
 /** How near the plan comes to its wanted inset, where it is worst, and whether it stays on the concrete. */
 export function FitVerdict({ answer }: { answer: FitAnswer | null }) {

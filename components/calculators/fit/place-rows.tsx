@@ -3,7 +3,8 @@
 import { LengthField } from "@/components/length-field/length-field";
 import { Select } from "@/components/ui/select";
 import { useTranslate } from "@/lib/client/i18n/messages-context";
-import { spokenSide, type PlanForm } from "../plan/inset-inputs";
+import type { PlanForm } from "../plan/inset-inputs";
+import { spokenSide } from "../plan/plan-fields";
 import { RowList } from "../plan/row-list";
 
 interface Rows {

@@ -43,7 +43,7 @@ function carriesOf({ corners, lines, bows }: FootprintAnswer, value: (name: stri
   const edges = bows.map(({ side, station, outward }) => ({ wall: side, station: rounded(station.in), offset: rounded(outward.in) }));
   const piece = first.chalk ?? first.length;
   return [
-    { href: calculatorAddress(t.locale, "fit", { corners: places, inset: value("inset"), edges }), label: t("footprint.carry.fit") },
+    { href: calculatorAddress(t.locale, "fit", { corners: places, inset: value("inset") || defaults.inset, edges }), label: t("footprint.carry.fit") },
     { href: calculatorAddress(t.locale, "anchors", { mode: "layout", pieces: [`${piece.exact ?? piece.in} in`] }), label: t("footprint.carry.bolts") },
   ];
 }

@@ -1,4 +1,4 @@
-import { insetOf, isTree, withoutBlankEnd } from "../plan/inset-inputs";
+import { insetOf, isTree, withoutBlankEnd } from "../plan/plan-fields";
 
 /** Names of the page's fields beside the API's own: `by` says how the plan is given, `each.ab` is a side's own inset, `runs.0.bearing` a direction that is none of four. */
 export const ways = ["runs", "walk", "readings"] as const;

@@ -4,7 +4,7 @@ import type { ReactNode } from "react";
 import type { FootprintAnswer } from "@/calculators/footprint";
 import { LengthText } from "@/components/ui/length-text";
 import { useTranslate } from "@/lib/client/i18n/messages-context";
-import { spokenSide } from "../plan/inset-inputs";
+import { spokenSide } from "../plan/plan-fields";
 
 interface Part {
   answer: FootprintAnswer;
