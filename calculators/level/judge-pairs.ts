@@ -38,10 +38,10 @@ export function judgePairs(elevations: readonly Elevation[], places: readonly (P
 }
 
 const rank = ({ ok }: JudgedPair) => (ok === false ? 0 : ok === null ? 1 : 2);
-const use = ({ difference, limit }: JudgedPair) => difference.toNumber() / limit.difference.toNumber();
+const shareUsed = ({ difference, limit }: JudgedPair) => difference.toNumber() / limit.difference.toNumber();
 
 function byUse(one: JudgedPair, other: JudgedPair): number {
-  return rank(one) - rank(other) || use(other) - use(one);
+  return rank(one) - rank(other) || shareUsed(other) - shareUsed(one);
 }
 
 /** An irrational distance is right to 1e-9 in: that much over still counts as on the limit. */

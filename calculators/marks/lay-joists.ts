@@ -1,4 +1,4 @@
-import { Length } from "../length";
+import { Length, printExact } from "../length";
 import { CalculationError } from "../schema";
 
 export interface Joist {
@@ -24,7 +24,7 @@ export interface JoistLine {
  * @throws CalculationError `too-many-marks`, `shorter-than-joists`.
  */
 export function layJoists({ length, spacing, thickness, first, most }: JoistLine): Joist[] {
-  if (length.compare(thickness.times(2)) < 0) throw new CalculationError([{ pointer: "/length", code: "shorter-than-joists", params: { least: thickness.times(2).toString() } }]);
+  if (length.compare(thickness.times(2)) < 0) throw new CalculationError([{ pointer: "/length", code: "shorter-than-joists", params: { least: printExact(thickness.times(2)) } }]);
   if (length.minus(first).inches.div(spacing.inches).compare(most) > 0) throw new CalculationError([{ pointer: "/spacing", code: "too-many-marks", params: { maximum: most } }]);
   const half = thickness.over(2);
   const lastMark = length.minus(thickness);

@@ -1,4 +1,4 @@
-import { Length } from "../length";
+import { Length, printLength, type Precision } from "../length";
 import { CalculationError, type Issue } from "../schema";
 import type { BoardPlan, BoardProblem, StretchToCut } from "./boards/board-problem";
 import { planBoards, type BoardsAnswer } from "./boards/plan-boards";
@@ -70,7 +70,7 @@ export function planPlates(input: PlatesInput, { now = () => performance.now(), 
       done += 1;
       return planWall(wall, settled, units, longest);
     });
-    const issues = stretches.flatMap((stretch) => faultsOf(stretch, units, settled));
+    const issues = stretches.flatMap((stretch) => faultsOf(stretch, units, settled, input.precision));
     if (issues.length > 0) {
       if (first === null) throw new CalculationError(issues);
       break; // shorter pieces cannot keep the rule: the stock is what lacks
@@ -126,7 +126,7 @@ function toCut({ plan }: PlannedStretch): StretchToCut {
 /** The cut list alone: every piece a stretch without joints. */
 function piecesToCut(input: PlatesInput, units: Units, stock: Stock): StretchToCut[] {
   const longest = longestPiece(stock);
-  const issues = input.pieces!.flatMap((piece, index): Issue[] => (units.whole(piece.length) > longest ? [{ pointer: `/pieces/${index}/length`, code: "piece-too-long", params: { longest: units.length(longest).toString() } }] : []));
+  const issues = input.pieces!.flatMap((piece, index): Issue[] => (units.whole(piece.length) > longest ? [{ pointer: `/pieces/${index}/length`, code: "piece-too-long", params: { longest: printLength(units.length(longest), input.precision) } }] : []));
   const count = input.pieces!.reduce((sum, piece) => sum + (piece.count ?? 1), 0);
   if (count > 500) issues.push({ pointer: "/pieces", code: "too-many", params: { maximum: 500 } });
   if (issues.length > 0) throw new CalculationError(issues);
@@ -134,10 +134,10 @@ function piecesToCut(input: PlatesInput, units: Units, stock: Stock): StretchToC
 }
 
 /** Why a stretch cannot keep the rule: which joint, and the least that would let it. */
-function faultsOf({ wall, part, plan, limits }: PlannedStretch, units: Units, { apart, clear, endDistance }: Settled): Issue[] {
+function faultsOf({ wall, part, plan, limits }: PlannedStretch, units: Units, { apart, clear, endDistance }: Settled, precision: Precision): Issue[] {
   if (isPlanned(plan)) return [];
   const pointer = `/walls/${wall.index}`;
-  const shown = (length: Length) => length.toString();
+  const shown = (length: Length) => printLength(length, precision);
   const where = { wall: wall.name, part: part.index + 1, from: shown(part.from), to: shown(part.to) };
   if (plan.longestNeeded !== null) return [{ pointer, code: "no-place-for-joint", params: { ...where, joint: plan.joint, reached: shown(units.length(plan.stuckAt)), longest: shown(units.length(limits.longest)), needed: shown(units.length(plan.longestNeeded)) } }];
   const least = clear.times(2).plus(limits.perPiece > 1 ? apart.times(limits.perPiece - 1) : Length.zero);
@@ -150,8 +150,8 @@ function faultsOf({ wall, part, plan, limits }: PlannedStretch, units: Units, { 
 function lackOf(input: PlatesInput, stretches: readonly PlannedStretch[], stock: Stock, units: Units, { kerf }: Settled): Issue {
   const wanted = input.pieces === undefined ? totalLength(stretches.map(({ part }) => part.to.minus(part.from))) : totalLength(input.pieces.map((piece) => piece.length.times(piece.count ?? 1)));
   const there = stock.kinds.reduce((sum, kind) => sum + (Number.isFinite(kind.count) ? kind.count * kind.capacity : Infinity), 0);
-  const given = Number.isFinite(there) ? units.length(there).minus(kerf.times(stock.kinds.reduce((sum, kind) => sum + kind.count, 0))).toString() : "";
-  return { pointer: "/stock", code: "not-enough-stock", params: { wanted: wanted.toString(), given } };
+  const given = Number.isFinite(there) ? printLength(units.length(there).minus(kerf.times(stock.kinds.reduce((sum, kind) => sum + kind.count, 0))), input.precision) : "";
+  return { pointer: "/stock", code: "not-enough-stock", params: { wanted: printLength(wanted, input.precision), given } };
 }
 
 function lengthsOf(input: PlatesInput, settled: Settled, walls: readonly SurveyedWall[]): Length[] {

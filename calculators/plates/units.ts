@@ -8,7 +8,7 @@ const mostPerInch = 100_000_000n;
 /**
  * A common measure of all lengths of a job, so that planning counts in whole numbers and stays exact.
  *
- * @throws CalculationError `too-fine` when the lengths share none that is coarse enough, such as sevenths beside seventeenths of everything.
+ * @throws CalculationError `no-common-measure` when the lengths share none that is coarse enough, such as sevenths beside seventeenths of everything.
  */
 export class Units {
   private readonly perInch: number;
@@ -17,7 +17,7 @@ export class Units {
     let shared = 8n;
     for (const { inches } of lengths) {
       shared = (shared * inches.d) / greatestCommon(shared, inches.d);
-      if (shared > mostPerInch) throw new CalculationError([{ pointer: "", code: "too-fine", params: {} }]);
+      if (shared > mostPerInch) throw new CalculationError([{ pointer: "", code: "no-common-measure", params: {} }]);
     }
     this.perInch = Number(shared);
   }

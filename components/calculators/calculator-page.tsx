@@ -6,6 +6,7 @@ import { Disclosure } from "@/components/ui/disclosure";
 import { ShowMe } from "@/components/ui/show-me";
 import { Sources } from "@/components/ui/sources";
 import { calculatorAddress } from "@/lib/client/calculator/calculator-address";
+import { borrowedTexts } from "@/lib/client/i18n/borrowed-texts";
 import type { Namespace } from "@/lib/client/i18n/catalogue";
 import { getTranslate, loadMessages } from "@/lib/client/i18n/load-messages";
 import { localePath, locales, type Locale } from "@/lib/client/i18n/locales";
@@ -86,7 +87,9 @@ function listOf(t: Translate, key: string): ReactNode[] {
 }
 
 function clientMessages(locale: Locale, namespace: Namespace) {
-  return Object.fromEntries(Object.entries(loadMessages(locale, [namespace])).filter(([key]) => !key.startsWith(`${namespace}.page.`)));
+  const borrowed = borrowedTexts[namespace];
+  const own = Object.entries(loadMessages(locale, [namespace])).filter(([key]) => !key.startsWith(`${namespace}.page.`));
+  return { ...(borrowed === undefined ? {} : loadMessages(locale, [borrowed.from], borrowed.under)), ...Object.fromEntries(own) };
 }
 
 /** Title, description and the page's other language. */

@@ -1,5 +1,6 @@
 import "server-only";
 import { calculators } from "@/calculators";
+import { borrowedTexts } from "@/lib/client/i18n/borrowed-texts";
 import type { Namespace } from "@/lib/client/i18n/catalogue";
 import { loadMessages } from "@/lib/client/i18n/load-messages";
 import type { Locale } from "@/lib/client/i18n/locales";
@@ -10,5 +11,6 @@ export function stageTexts(locale: Locale, name: string): Messages {
   if (name === "reading") return loadMessages(locale, ["set"], ["set.reading.", "set.readings."]);
   const cautions = calculators.find((calculator) => calculator.name === name)?.cautions ?? [];
   const own = Object.entries(loadMessages(locale, [name as Namespace])).filter(([key]) => !key.startsWith(`${name}.page.`));
-  return { ...Object.fromEntries(own), ...loadMessages(locale, ["errors"]), ...loadMessages(locale, ["cautions"], cautions.map((code) => `cautions.${code}`)) };
+  const borrowed = borrowedTexts[name];
+  return { ...(borrowed === undefined ? {} : loadMessages(locale, [borrowed.from], borrowed.under)), ...Object.fromEntries(own), ...loadMessages(locale, ["errors"]), ...loadMessages(locale, ["cautions"], cautions.map((code) => `cautions.${code}`)) };
 }

@@ -159,7 +159,7 @@ describe("each its own answer", () => {
     ["nothing but opening", { walls: [{ name: "ab", length: "8 ft", openings: [{ from: "0", to: "8 ft" }] }], stock: sixteens }, "/walls/0 no-plate-left"],
     ["a bolt from the slab with no inset", { walls: [{ name: "ab", length: "8 ft", bolts: [{ station: 8, from: "slab" }] }], stock: sixteens }, "/inset inset-needed"],
     ["a part too short for two bolts (B26)", { walls: [{ name: "ab", length: "6 in" }], stock: sixteens }, "/walls/0 part-too-short"],
-    ["lengths that share no measure", { pieces: [{ length: "8.1234567891" }, { length: "7.7654321" }], stock: [{ length: "10.333333333" }] }, " too-fine"],
+    ["lengths that share no measure", { pieces: [{ length: "8.1234567891" }, { length: "7.7654321" }], stock: [{ length: "10.333333333" }] }, " no-common-measure"],
     ["a wall too long", { walls: [{ name: "ab", length: "501 ft" }], stock: sixteens }, "/walls/0/length wall-too-long"],
   ])("%s", (_what, request, told) => {
     expect(codes(request)).toContain(told);
@@ -168,7 +168,7 @@ describe("each its own answer", () => {
   test("bolts so close that no joint fits: which wall, which joint, and the board that would do", () => {
     const close = Array.from({ length: 60 }, (_, index) => 5 + index * 6);
     const { issues } = ask({ walls: [{ name: "ab", length: "8 ft", bolts: bolts(8, 88) }, { name: "bc", length: "30 ft", bolts: bolts(...close) }], stock: sixteens });
-    expect(issues).toEqual([{ pointer: "/walls/1", code: "no-place-for-joint", params: expect.objectContaining({ wall: "bc", joint: 1, longest: "192", needed: "360" }) }]);
+    expect(issues).toEqual([{ pointer: "/walls/1", code: "no-place-for-joint", params: expect.objectContaining({ wall: "bc", joint: 1, longest: "16' 0\"", needed: "30' 0\"" }) }]);
   });
 
   test("a kerf of nothing lets two halves come from one board, a kerf of 1/8 does not (C06)", () => {

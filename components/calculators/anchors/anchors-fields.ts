@@ -54,7 +54,8 @@ function insetPair(wall: string, own: string, first: string): Tree {
 
 export const ownFigures = ["spacing", "endMinimum", "endMaximum", "diameter", "edgeCover"] as const;
 
-function ownRule(own: Tree): Tree {
+/** Figures from one's own drawings, as the API takes a rule. */
+export function ownRule(own: Tree): Tree {
   const figures = Object.fromEntries(ownFigures.flatMap((name) => (own[name] === undefined ? [] : [[name, { value: own[name] }]])));
   return { ...figures, ...(own.boltsPerPiece === undefined ? {} : { boltsPerPiece: { value: own.boltsPerPiece } }), ...(own.middleThird === "true" ? { middleThird: { value: "true" } } : {}) };
 }

@@ -8,14 +8,17 @@ import { Select } from "@/components/ui/select";
 import { TextField } from "@/components/ui/text-field";
 import { fieldId } from "@/lib/client/calculator/field-id";
 import { useTranslate } from "@/lib/client/i18n/messages-context";
-import type { AnchorsForm } from "./anchors-calculator";
+import type { PlanForm } from "../plan/inset-inputs";
 import { ownFigures } from "./anchors-fields";
 import { RuleTable } from "./rule-table";
 
 const ids = Object.keys(publishedRuleTexts) as (keyof typeof publishedRuleTexts)[];
 
+/** A form with a `rule`, published or `own.*`; its texts are those of the bolts' page. */
+export type RuleForm = Omit<PlanForm, "rows" | "removeRow" | "unit"> & { fields: Readonly<Record<string, string>> };
+
 /** The rule to judge by: a published one with each figure's clause and status, or figures from one's own drawings. */
-export function RuleChoice({ form }: { form: AnchorsForm }) {
+export function RuleChoice({ form }: { form: RuleForm }) {
   const t = useTranslate();
   const isOwn = form.value("rule") === "own" || Object.keys(form.fields).some((name) => name.startsWith("rule."));
   const id = ids.find((known) => known === form.value("rule")) ?? "us-irc";
