@@ -1,4 +1,5 @@
-import { existsSync, mkdirSync, mkdtempSync, renameSync, rmSync, writeFileSync } from "node:fs";
+import { createHash } from "node:crypto";
+import { existsSync, lstatSync, mkdirSync, mkdtempSync, renameSync, rmSync, writeFileSync } from "node:fs";
 import { connect } from "node:net";
 import os from "node:os";
 import path from "node:path";
@@ -9,10 +10,19 @@ import { mustRun } from "./run.mjs";
 
 const asRoot = () => (process.getuid?.() === 0 ? ["--user=root"] : []);
 
-/** A folder for sockets: short, since a socket's path may have 107 characters at most and a project's folder can be deep. */
-export function socketFolder() {
+/**
+ * A folder for a service's socket: short, since a socket's path may have 107 characters at most and a project's folder can be
+ * deep. Its name follows from the data folder, so that a kill leaves nothing the next start does not take up again; one
+ * that is not ours alone is not trusted.
+ */
+export function socketFolder(dataDir, service) {
   const base = os.tmpdir().length < 60 ? os.tmpdir() : "/tmp";
-  return mkdtempSync(path.join(base, "sillwright-"));
+  const name = `sillwright-${createHash("sha256").update(dataDir).digest("hex").slice(0, 12)}-${service}`;
+  const folder = path.join(base, name);
+  mkdirSync(folder, { recursive: true, mode: 0o700 });
+  const { uid, mode } = lstatSync(folder);
+  const ours = uid === (process.getuid?.() ?? uid) && (mode & 0o170777) === 0o040700;
+  return ours ? folder : mkdtempSync(path.join(base, `${name}-`));
 }
 
 /** Makes an empty MariaDB data folder. It gets its name only when it is complete, so that a kill half-way leaves no half. */
@@ -47,7 +57,7 @@ export async function startMariadb({ dataDir, runDir, logDir, port: asked, passw
   const fresh = !existsSync(folder);
   if (fresh) await createData(folder);
   const port = await choosePort({ asked, variable: "MARIADB_PORT" });
-  const sockets = socketFolder();
+  const sockets = socketFolder(dataDir, "mariadb");
   const initFile = path.join(dataDir, "mariadb-init.sql");
   const user = "'sillwright'@'127.0.0.1'";
   writeFileSync(initFile, [

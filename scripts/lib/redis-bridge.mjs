@@ -16,9 +16,10 @@ const opens = (address) =>
   });
 
 /** Debian's Redis on a socket only we can reach: nothing kept on disk, nothing on the network. */
-export async function startRedis({ dataDir, runDir, logDir, sockets = socketFolder() }) {
+export async function startRedis({ dataDir, runDir, logDir }) {
   const folder = path.join(dataDir, "redis");
   mkdirSync(folder, { recursive: true, mode: 0o700 });
+  const sockets = socketFolder(dataDir, "redis");
   const socket = path.join(sockets, "redis.sock");
   const service = startService({
     name: "redis",
@@ -34,7 +35,7 @@ export async function startRedis({ dataDir, runDir, logDir, sockets = socketFold
     await service.stop();
     throw error;
   }
-  const again = () => startRedis({ dataDir, runDir, logDir, sockets });
+  const again = () => startRedis({ dataDir, runDir, logDir });
   return { service, stop: service.stop, again, socket };
 }
 

@@ -1,6 +1,4 @@
 import path from "node:path";
-import { firstLoad } from "../bench/first-load.mjs";
-import { keyPresses } from "../bench/key-press.mjs";
 import { staticPages } from "../bench/static-pages.mjs";
 import { printTable } from "../bench/table.mjs";
 import { batchOverSingle, requestsOverEcho } from "../bench/throughput.mjs";
@@ -25,6 +23,9 @@ await lifecycle(async (keep) => {
   for (const name of ["DATABASE_URL", "UPSTASH_REDIS_REST_URL", "UPSTASH_REDIS_REST_TOKEN", "SITE_URL", "PORT", "HOST", "MARIADB_PORT", "SILLWRIGHT_DATA_DIR"]) delete process.env[name];
   await step("Disk", () => checkDisk(root));
   await step("Packages from npm", () => ensurePackages(root));
+  // What drives the browser is a package itself, and is there only now.
+  const { firstLoad } = await import("../bench/first-load.mjs");
+  const { keyPresses } = await import("../bench/key-press.mjs");
   await step("Packages from Debian", () => ensureSystemPackages(["mariadb", "redis", "chromium"]));
   const folder = await throwawayFolder(keep);
   const { environment } = await throwawayServices(folder, keep);

@@ -1,5 +1,5 @@
 import { execFileSync } from "node:child_process";
-import { mkdirSync, mkdtempSync, rmSync, writeFileSync } from "node:fs";
+import { mkdirSync, mkdtempSync, readdirSync, readFileSync, rmSync, writeFileSync } from "node:fs";
 import { createServer, type Server } from "node:net";
 import os from "node:os";
 import path from "node:path";
@@ -144,4 +144,20 @@ test("an old Node gets as far as its sentence: the launcher and what it imports 
   const source = execFileSync("cat", ["scripts/start.mjs", "scripts/lib/node-version.mjs"], { encoding: "utf8" });
   expect(source.match(/^import .*$/gm)).toEqual(['import { task } from "./lib/node-version.mjs";']);
   expect(source.replace(/\/\*\*.*\*\/|\/\/.*/g, "")).not.toMatch(/\?\?|\?\.|=>|\bawait\b|`/);
+});
+
+test("a fresh clone gets as far as installing its packages: until then no task loads one", () => {
+  const files = new Set<string>();
+  const packages = new Set<string>();
+  const follow = (file: string) => {
+    if (files.has(file)) return;
+    files.add(file);
+    for (const [, from = ""] of readFileSync(file, "utf8").matchAll(/^import .*?from "([^"]+)"/gm)) {
+      if (from.startsWith(".")) follow(path.resolve(path.dirname(file), from));
+      else if (!from.startsWith("node:")) packages.add(`${from} in ${file}`);
+    }
+  };
+  for (const name of readdirSync("scripts/tasks")) follow(path.resolve("scripts/tasks", name));
+  expect(files.size).toBeGreaterThan(20);
+  expect([...packages]).toEqual([]);
 });
