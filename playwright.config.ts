@@ -16,6 +16,7 @@ export default defineConfig({
   use: {
     baseURL: process.env.E2E_BASE_URL ?? "http://localhost:3000",
     locale: "en-US",
+    serviceWorkers: "block", // a test that is not about working without signal must not fetch the whole site behind its page
     trace: "off",
     screenshot: "only-on-failure",
     launchOptions: {

@@ -59,16 +59,16 @@ describe("values go from stage to stage", () => {
 
   test("the recheck and the bolts take the lines: 336 and 264 less two insets of 7/16 each", () => {
     const set = type(take(begun, chalk), chalk, { inset: "7/16" });
-    // by hand: 336 − 7/8 = 335 1/8 = 2681/8, 264 − 7/8 = 263 1/8 = 2105/8
-    expect(carriedInto(set, stages, recheck)).toEqual({ length: "2681/8 in", width: "2105/8 in", burn: "1 in" });
-    expect(carriedInto(set, stages, slot("bolts", "bc"))).toEqual({ "pieces.0.to": "2105/8 in", inset: "7/16 in", mode: "check", wall: "bc" });
+    // by hand: 336 − 7/8 = 335 1/8, 264 − 7/8 = 263 1/8
+    expect(carriedInto(set, stages, recheck)).toEqual({ length: "335 1/8 in", width: "263 1/8 in", burn: "1 in" });
+    expect(carriedInto(set, stages, slot("bolts", "bc"))).toEqual({ "pieces.0.to": "263 1/8 in", inset: "7/16 in", mode: "check", wall: "bc" });
   });
 
   test("the plates take every wall with its bolts, and the plates' own core accepts them", () => {
     let set = type(take(begun, chalk), chalk, { inset: "7/16" });
     for (const wall of ["ab", "bc", "cd", "da"]) set = type(take(set, slot("bolts", wall)), slot("bolts", wall), { rule: "us-irc", plateWidth: "5 1/2", "bolts.0.station": "9", "bolts.0.offset": "2 3/4", "bolts.1.station": "66", "bolts.2.station": "130", "bolts.3.station": "190", "bolts.4.station": "250" });
     const carried = carriedInto(set, stages, slot("plates"))!;
-    expect([carried["walls.0.name"], carried["walls.0.length"], carried["walls.3.bolts.0.station"], carried["walls.3.bolts.0.offset"]]).toEqual(["ab", "2681/8 in", "9 in", "11/4 in"]);
+    expect([carried["walls.0.name"], carried["walls.0.length"], carried["walls.3.bolts.0.station"], carried["walls.3.bolts.0.offset"]]).toEqual(["ab", "335 1/8 in", "9 in", "2 3/4 in"]);
     const request = inputFromQuery(Object.entries({ ...carried, "stock.0.length": "16 ft" }));
     expect(answerTo(platesOperation as Operation, request).issues).toEqual([]);
   });

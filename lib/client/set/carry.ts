@@ -96,9 +96,9 @@ export function takingPatch(set: SillSet, slot: Slot, now: Texts): { fields: Rec
   return { fields: { ...Object.fromEntries(gone), ...now }, taken: now };
 }
 
-/** Whether the values may be taken without asking: nothing was taken yet, and none of their fields is filled. */
+/** Whether the values may be taken without asking: nothing was taken yet, and none of their fields says otherwise. */
 export function mayTakeQuietly(set: SillSet, slot: Slot, now: Texts): boolean {
   const calculation = set.calculations[slot.id];
   if (calculation === undefined) return true;
-  return Object.keys(calculation.taken).length === 0 && Object.keys(now).every((name) => (calculation.fields[name] ?? "") === "");
+  return Object.keys(calculation.taken).length === 0 && Object.keys(now).every((name) => ["", now[name]].includes(calculation.fields[name] ?? ""));
 }

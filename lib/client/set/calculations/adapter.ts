@@ -29,8 +29,13 @@ export interface Asked {
 /** A double of inches as a field takes it: never 1e-9, and a billionth of an inch is more than any tape shows. */
 export const inchText = (inches: number) => `${inches.toFixed(9).replace(/\.?0+$/, "").replace(/^-0$/, "0")} in`;
 
-/** A length of an answer as a text that loses nothing; irrational ones to a billionth of an inch. */
-export const exactText = ({ exact, in: inches }: Pick<LengthAnswer, "exact" | "in">) => (exact === null ? inchText(inches) : `${exact} in`);
+/** A length of an answer as a text that loses nothing, as a tape is read: 335 1/8 in; irrational ones to a billionth of an inch. */
+export function exactText({ exact, in: inches }: Pick<LengthAnswer, "exact" | "in">): string {
+  if (exact === null) return inchText(inches);
+  const [, top, bottom] = /^(\d+)\/(\d+)$/.exec(exact) ?? [];
+  if (top === undefined || bottom === undefined || BigInt(top) < BigInt(bottom)) return `${exact} in`;
+  return `${BigInt(top) / BigInt(bottom)} ${BigInt(top) % BigInt(bottom)}/${bottom} in`;
+}
 
 /** Some lengths of the plain input, by new names, with their unit written out; those left out stay out. */
 export function typed({ input, unit }: Asked, names: Readonly<Record<string, string>>): Texts {
