@@ -30,7 +30,7 @@ export interface Certificate {
 /** How near (inches) the search comes to the best there is. */
 const gap = { rigid: 1e-7, free: 1e-5 };
 /** Places that do not decide the worst departure are made as good as they can be, as far as this much searching goes. */
-const rest = { gap: 1e-4, intervals: 120 };
+const rest = { gap: 1e-4, intervals: 60, levels: 3 };
 
 /** Settled places keep this much room (inches), so that rounding cannot shut the figure found out. */
 const slack = 1e-9;
@@ -49,10 +49,14 @@ export function bestFit(slab: Slab, placing: Placing, overhang: number): Laid {
   const question: Question = { overhang: limited.kept ? overhang : null, settled };
   const found = limited.found;
   const weights = balanceAt(slab, placing, question, found.angle) ?? found.weights;
-  const { angle } = settleRest(slab, placing, question, found, weights);
+  const turned = settleRest(slab, placing, question, found, weights).angle;
+  const best = minimax(placesOf(slab, placing.poseAt(turned)), placing.unknowns, question);
+  // Where a limit leaves hardly any angle, rounding can let the rest turn the plan away from its best.
+  const keeps = best !== null && best.worst <= found.worst + 2 * slack;
+  const angle = keeps ? turned : found.angle;
   const pose = placing.poseAt(angle);
   const places = placesOf(slab, pose);
-  const first = minimax(places, placing.unknowns, question) ?? found;
+  const first = keeps ? best : (minimax(places, placing.unknowns, question) ?? found);
   return { ...laidOut(slab, pose, restAt(places, placing.unknowns, question, first).unknowns, angle), fits: limited.fits, overhangNeeded: limited.needed, certificate: { proved: found.proved, lowerBound: found.lowerBound, weights } };
 }
 
@@ -115,7 +119,7 @@ function settleRest(slab: Slab, placing: Placing, question: Question, found: Fou
   const settled = [...question.settled];
   let last = found;
   let weights = firstWeights;
-  for (let level = 0; level < placing.unknowns + 2 && last.worst > 1e-9; level += 1) {
+  for (let level = 0; level < rest.levels && last.worst > 1e-9; level += 1) {
     const worst = last.worst;
     const deciding = weights.flatMap((weight, place) => (weight > 1e-6 && settled[place] === null ? [place] : []));
     if (deciding.length === 0) break;

@@ -31,28 +31,45 @@ const leeway = 1e-11;
  */
 export function solveLinearProgram(cost: readonly number[], conditions: readonly Condition[], box: number): Solved | null {
   const unknowns = cost.length;
-  const walls = cost.flatMap((_, index): Condition[] => [1, -1].map((sign) => ({ row: cost.map((_, other) => (other === index ? sign : 0)), bound: -box })));
-  const all = [...conditions, ...walls];
-  const basis = cost.map((item, index) => conditions.length + 2 * index + (item < 0 ? 1 : 0));
+  const count = conditions.length;
+  // Conditions, then for each unknown the two walls of the box: x ≥ −box and −x ≥ −box.
+  const boundOf = (index: number) => (index < count ? conditions[index]!.bound : -box);
+  const basis = cost.map((item, index) => count + 2 * index + (item < 0 ? 1 : 0));
   // Columns of the inverse of the basis' rows: at the box's corner a diagonal of signs.
-  const inverse = basis.map((index, order) => Float64Array.from(cost, (_, item) => (item === order ? all[index]!.row[order]! : 0)));
+  const inverse = cost.map((item, order) => {
+    const column = new Float64Array(unknowns);
+    column[order] = item < 0 ? -1 : 1;
+    return column;
+  });
+  const x = new Float64Array(unknowns);
+  const weights = new Float64Array(unknowns);
+  const multipliers = new Float64Array(unknowns);
   const patience = 50 * unknowns + 200;
   for (let step = 0; step < 4 * patience; step += 1) {
-    const x = pointOf(inverse, basis, all, unknowns);
-    const entering = mostMissed(all, x, step > patience);
-    if (entering < 0) {
-      return settle(cost, conditions, all, basis);
+    x.fill(0);
+    for (let order = 0; order < unknowns; order += 1) {
+      const bound = boundOf(basis[order]!);
+      const column = inverse[order]!;
+      for (let item = 0; item < unknowns; item += 1) x[item] = x[item]! + bound * column[item]!;
     }
-    const weights = inverse.map((column) => along(column, all[entering]!.row));
-    const multipliers = inverse.map((column) => along(column, cost));
+    const entering = mostMissed(conditions, x, box, step > patience);
+    if (entering < 0) return settle(cost, conditions, box, basis);
+    const wall = entering - count;
+    for (let order = 0; order < unknowns; order += 1) {
+      const column = inverse[order]!;
+      weights[order] = wall < 0 ? along(column, conditions[entering]!.row) : column[wall >> 1]! * (wall % 2 === 0 ? 1 : -1);
+      multipliers[order] = along(column, cost);
+    }
     const leaving = leavingOf(basis, weights, multipliers, step > patience);
     if (leaving < 0) return null;
-    const pivot = inverse[leaving]!.map((item) => item / weights[leaving]!);
-    inverse.forEach((column, order) => {
-      if (order === leaving || weights[order] === 0) return;
-      for (let item = 0; item < unknowns; item += 1) column[item] = column[item]! - weights[order]! * pivot[item]!;
-    });
-    inverse[leaving] = pivot;
+    const pivot = inverse[leaving]!;
+    for (let item = 0; item < unknowns; item += 1) pivot[item] = pivot[item]! / weights[leaving]!;
+    for (let order = 0; order < unknowns; order += 1) {
+      const weight = weights[order]!;
+      if (order === leaving || weight === 0) continue;
+      const column = inverse[order]!;
+      for (let item = 0; item < unknowns; item += 1) column[item] = column[item]! - weight * pivot[item]!;
+    }
     basis[leaving] = entering;
   }
   return null;
@@ -64,44 +81,44 @@ function along(column: Float64Array, row: readonly number[]): number {
   return sum;
 }
 
-function pointOf(inverse: readonly Float64Array[], basis: readonly number[], all: readonly Condition[], unknowns: number): number[] {
-  const x = new Array<number>(unknowns).fill(0);
-  inverse.forEach((column, order) => {
-    const { bound } = all[basis[order]!]!;
-    for (let item = 0; item < unknowns; item += 1) x[item] = x[item]! + bound * column[item]!;
-  });
-  return x;
-}
-
-function settle(cost: readonly number[], conditions: readonly Condition[], all: readonly Condition[], basis: readonly number[]): Solved | null {
-  const rows = basis.map((index) => all[index]!.row);
-  const x = solveLinear(rows, basis.map((index) => all[index]!.bound));
+function settle(cost: readonly number[], conditions: readonly Condition[], box: number, basis: readonly number[]): Solved | null {
+  const count = conditions.length;
+  const rowOf = (index: number) => (index < count ? conditions[index]!.row : cost.map((_, item) => (item === (index - count) >> 1 ? ((index - count) % 2 === 0 ? 1 : -1) : 0)));
+  const rows = basis.map(rowOf);
+  const x = solveLinear(rows, basis.map((index) => (index < count ? conditions[index]!.bound : -box)));
   const y = solveLinear(rows.map((_, column) => rows.map((row) => row[column]!)), cost);
   if (x === null || y === null) return null;
-  const multipliers = new Array<number>(conditions.length).fill(0);
+  const multipliers = new Array<number>(count).fill(0);
   basis.forEach((index, order) => {
-    if (index < conditions.length) multipliers[index] = Math.max(0, y[order]!);
+    if (index < count) multipliers[index] = Math.max(0, y[order]!);
   });
   return { x, value: x.reduce((sum, item, index) => sum + item * cost[index]!, 0), multipliers };
 }
 
-function mostMissed(all: readonly Condition[], x: readonly number[], byNumber: boolean): number {
+function mostMissed(conditions: readonly Condition[], x: Float64Array, box: number, byNumber: boolean): number {
   let found = -1;
   let most = missed;
-  for (let index = 0; index < all.length; index += 1) {
-    const { row, bound } = all[index]!;
+  for (let index = 0; index < conditions.length; index += 1) {
+    const { row, bound } = conditions[index]!;
     let short = bound;
-    for (let item = 0; item < row.length; item += 1) short -= row[item]! * x[item]!;
+    for (let item = 0; item < x.length; item += 1) short -= row[item]! * x[item]!;
     if (short <= most) continue;
     found = index;
     if (byNumber) return found;
     most = short;
   }
+  for (let item = 0; item < x.length; item += 1) {
+    const past = Math.abs(x[item]!) - box;
+    if (past <= Math.max(most, 1e-7)) continue;
+    found = conditions.length + 2 * item + (x[item]! < 0 ? 0 : 1);
+    if (byNumber) return found;
+    most = past;
+  }
   return found;
 }
 
 /** The condition whose multiplier runs out first; of those that nearly do, the one that turns sharpest, or by number. */
-function leavingOf(basis: readonly number[], weights: readonly number[], multipliers: readonly number[], byNumber: boolean): number {
+function leavingOf(basis: readonly number[], weights: Float64Array, multipliers: Float64Array, byNumber: boolean): number {
   let least = Infinity;
   weights.forEach((weight, order) => {
     if (weight > 1e-9) least = Math.min(least, (Math.max(0, multipliers[order]!) + (byNumber ? 0 : leeway)) / weight);

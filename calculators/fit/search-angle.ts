@@ -54,7 +54,7 @@ export function searchAngle(slab: Slab, placing: Placing, question: Question, ga
     for (const half of [{ from: next.from, to: middle }, { from: middle, to: next.to }]) {
       const bound = boundOver(slab, placing, question, half, ceiling);
       if (bound === null) continue;
-      tryAngle(bound.angle);
+      if (bound.value < worstOf(best) - gap) tryAngle(bound.angle);
       const child = { ...half, lowerBound: Math.max(next.lowerBound, bound.value) };
       const at = open.findIndex((other) => other.lowerBound <= child.lowerBound);
       open.splice(at < 0 ? open.length : at, 0, child);

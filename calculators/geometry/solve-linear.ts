@@ -5,7 +5,7 @@ export type Matrix = readonly (readonly number[])[];
 export function solveLinear(matrix: Matrix, right: readonly number[]): number[] | null {
   const size = right.length;
   const rows = matrix.map((row, index) => [...row, right[index]!]);
-  const scale = Math.max(...matrix.flat().map(Math.abs), 0);
+  const scale = matrix.reduce((most, row) => row.reduce((own, item) => Math.max(own, Math.abs(item)), most), 0);
   for (let column = 0; column < size; column += 1) {
     let pivot = column;
     for (let row = column + 1; row < size; row += 1) if (Math.abs(rows[row]![column]!) > Math.abs(rows[pivot]![column]!)) pivot = row;

@@ -10,7 +10,7 @@ export const apiAnswer = `{ "shape": "racked",
   "difference": {
     "text": "1/2\\"", … },
   "rack": {
-    "side": "CD", "toward": "D",
+    "side": "cd", "toward": "D",
     "distance": {
       "text": "5/16\\"",
       "lean": "strong", … } }, … }`;
