@@ -1,3 +1,5 @@
+import { createServer, request } from "node:http";
+import type { AddressInfo } from "node:net";
 import { expect, test, type BrowserContext, type Page } from "@playwright/test";
 
 test.use({ serviceWorkers: "allow" });
@@ -73,9 +75,9 @@ test("a page that needs signal says so in its language, and the way on works", a
   await expect(page.getByRole("heading", { level: 1 })).toHaveText("No signal, and this page needs it");
   await page.goto("/es/calculators/squareness/answer?length=28");
   await expect(page.getByRole("heading", { level: 1 })).toHaveText("Sin señal, y esta página la necesita");
-  await page.getByRole("link", { name: "Ir a sus juegos" }).click();
+  await page.getByRole("link", { name: "Ir a sus trazos" }).click();
   await expect(page.locator("html")).toHaveAttribute("lang", "es");
-  await expect(page.getByRole("button", { name: "Empezar un juego" })).toBeVisible();
+  await expect(page.getByRole("button", { name: "Empezar un trazo" })).toBeVisible();
 });
 
 test("the worker is asked for anew each time, keeps no answer of the API, and pages made at request time stay out of its caches", async ({ page }) => {
@@ -92,19 +94,43 @@ test("the worker is asked for anew each time, keeps no answer of the API, and pa
   expect(kept.filter((path) => /^\/(?:es\/)?(?:api|c)\/|\/answer$|^\/(?:es\/)?developers/.test(path))).toEqual([]);
 });
 
-test("a new version is offered, not forced: the page goes on until it is asked for", async ({ page, context }) => {
+/** The site behind an address of its own, whose worker can be replaced as by a new edition. */
+async function siteWithEditions(baseURL: string): Promise<{ address: string; publish: () => void; close: () => void }> {
+  let edition = "";
+  const server = createServer((incoming, outgoing) => {
+    const target = request(new URL(incoming.url ?? "/", baseURL), { method: incoming.method, headers: { ...incoming.headers, host: new URL(baseURL).host, "accept-encoding": "identity" } }, (answer) => {
+      const headers = { ...answer.headers };
+      const isWorker = incoming.url === "/sw.js";
+      if (isWorker) for (const name of ["content-length", "etag", "last-modified"]) delete headers[name];
+      outgoing.writeHead(answer.statusCode ?? 502, headers);
+      if (!isWorker) return void answer.pipe(outgoing);
+      answer.pipe(outgoing, { end: false });
+      answer.on("end", () => outgoing.end(edition));
+    });
+    target.on("error", () => outgoing.destroy());
+    incoming.pipe(target);
+  });
+  await new Promise<void>((resolve) => server.listen(0, "127.0.0.1", resolve));
+  return { address: `http://localhost:${(server.address() as AddressInfo).port}`, publish: () => (edition += "\n// another edition"), close: () => void server.close() };
+}
+
+test("a new version is offered, not forced: the page goes on until it is asked for, and other tabs are told", async ({ page, context, baseURL }) => {
   test.slow();
-  await visitOnce(page, "/set");
-  // The server now has another edition: the same worker with one byte more.
-  const script = await (await page.request.get("/sw.js")).text();
-  await context.route("**/sw.js", (route) => route.fulfill({ contentType: "text/javascript", headers: { "cache-control": "no-cache" }, body: `${script}\n// another edition` }));
-  await page.evaluate(async () => void (await (await navigator.serviceWorker.getRegistration())!.update().catch(() => undefined)));
-  const offered = page.getByText("A new version of the site is ready.");
-  if (!(await offered.isVisible({ timeout: 15_000 }).catch(() => false))) await expect(offered).toBeVisible({ timeout: 30_000 });
+  const site = await siteWithEditions(baseURL!);
+  await visitOnce(page, `${site.address}/set`);
+  const other = await context.newPage();
+  await other.goto(`${site.address}/calculators`);
+  site.publish();
+  await page.waitForTimeout(2_500); // the page registers a moment after it has loaded
+  await page.evaluate(async () => void (await (await navigator.serviceWorker.getRegistration())!.update()));
+  await expect(page.getByText("A new version of the site is ready.")).toBeVisible({ timeout: 30_000 });
   await page.getByLabel("Name of the foundation").fill("typed before");
+  await expect(page.getByLabel("Name of the foundation")).toHaveValue("typed before");
   await Promise.all([page.waitForEvent("load"), page.getByRole("button", { name: "Use it now" }).click()]);
-  await expect(offered).toHaveCount(0);
+  await expect(page.getByText("A new version of the site is ready.")).toHaveCount(0);
   expect(await page.evaluate(async () => (await navigator.serviceWorker.getRegistration())?.waiting ?? null)).toBeNull();
+  await expect(other.getByText("Another tab moved to the new version.")).toBeVisible();
+  site.close();
 });
 
 test("the site can be installed: a manifest in each language, with its icons", async ({ page }) => {
