@@ -16,11 +16,14 @@ import { goTo, SetLink } from "./set-link";
 
 const dayMilliseconds = 86_400_000;
 const keptDays = 30;
+/** A set deleted so lately, in milliseconds, is offered back above the list. */
+const justNow = 60_000;
 
 /** Every set on the device, and the ways to begin one. */
 export function SetList({ sets, stages }: { sets: readonly SillSet[]; stages: readonly Stage[] }) {
   const t = useTranslate();
   const [name, setName] = useState("");
+  const [opened] = useState(() => Date.now());
   const live = sets.filter(({ deleted }) => deleted === null).sort((a, b) => b.changed.localeCompare(a.changed));
   const gone = sets.filter(({ deleted }) => deleted !== null).sort((a, b) => b.deleted!.localeCompare(a.deleted!));
 
@@ -56,7 +59,7 @@ export function SetList({ sets, stages }: { sets: readonly SillSet[]; stages: re
         </Button>
         <OpenSetFile />
       </div>
-      {gone[0] !== undefined && Date.now() - Date.parse(gone[0].deleted!) < 60_000 ? (
+      {gone[0] !== undefined && Date.parse(gone[0].deleted!) > opened - justNow ? (
         <p className="set-bar" role="status">
           <span>{t("set.deletedBar", { name: gone[0].name })}</span>
           <Button small onClick={() => restore(gone[0]!.id)}>

@@ -12,6 +12,7 @@ import type { SillSet } from "@/lib/client/set/schema";
 import { keepReport, stageFormStore } from "@/lib/client/set/stage-form";
 import type { Slot, Stage } from "@/lib/client/set/stages";
 import { setStore } from "@/lib/client/set/use-sets";
+import { refocusChoice } from "./set-link";
 import { stageCalculators } from "./stage-calculators";
 
 interface StagePanelProps {
@@ -25,6 +26,7 @@ interface StagePanelProps {
 }
 
 interface Loaded {
+  of: string;
   Calculator: ComponentType<{ header: ReactNode }>;
   messages: Messages;
 }
@@ -40,7 +42,7 @@ export function StagePanel({ set, stages, slot, core, header, next }: StagePanel
   useEffect(() => {
     let over = false;
     void Promise.all([stageCalculators[calculator]!(), loadTexts(locale, calculator)]).then(
-      ([Calculator, messages]) => over || setLoaded({ Calculator, messages }),
+      ([Calculator, messages]) => over || setLoaded({ of: calculator, Calculator, messages }),
       () => over || setLoaded("failed"),
     );
     return () => {
@@ -48,6 +50,7 @@ export function StagePanel({ set, stages, slot, core, header, next }: StagePanel
     };
   }, [locale, calculator, tries]);
   useTakeQuietly(set, stages, slot);
+  useEffect(refocusChoice, [slot.id, loaded]);
 
   const home = useStageHome(set.id, slot, core, next);
   if (loaded === "failed") {
@@ -59,11 +62,12 @@ export function StagePanel({ set, stages, slot, core, header, next }: StagePanel
       </div>
     );
   }
-  if (loaded === null) return <div className="set-part">{header}</div>;
+  // A calculator must never meet another's form.
+  if (loaded === null || loaded.of !== calculator) return <div className="set-part">{header}</div>;
   return (
     <MessagesProvider locale={locale} messages={loaded.messages}>
       <FormHomeContext value={home}>
-        <loaded.Calculator header={header} />
+        <loaded.Calculator key={slot.id} header={header} />
       </FormHomeContext>
     </MessagesProvider>
   );

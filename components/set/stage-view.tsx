@@ -9,7 +9,7 @@ import { setAddress } from "@/lib/client/set/set-address";
 import type { StageState } from "@/lib/client/set/stage-state";
 import { chosenFor, type Slot, type Stage } from "@/lib/client/set/stages";
 import { setStore } from "@/lib/client/set/use-sets";
-import { goTo, SetLink } from "./set-link";
+import { goByChoice, goTo, SetLink } from "./set-link";
 import { StagePanel } from "./stage-panel";
 import { StaleNote } from "./stale-note";
 
@@ -49,7 +49,7 @@ export function StageView({ set, stages, states, state, part, versions }: StageV
 
   const choose = (calculator: string) => {
     if (stage.main.includes(calculator) && calculator !== chosenFor(set, stage)) setStore().change(set.id, { choices: { [stage.name]: calculator } }, { what: "choice" });
-    goTo(setAddress(t.locale, { set: set.id, stage: stage.name, part: stage.beside.includes(calculator) ? calculator : null }));
+    goByChoice(setAddress(t.locale, { set: set.id, stage: stage.name, part: stage.beside.includes(calculator) ? calculator : null }), "set-choice");
   };
   const offered = [...stage.main, ...stage.beside];
   const walls = slots.flatMap((known) => (known.slot.wall === undefined ? [] : [known.slot.wall]));
@@ -71,7 +71,7 @@ export function StageView({ set, stages, states, state, part, versions }: StageV
             name="set-wall"
             legend={t("set.stages.walls")}
             value={slot.wall ?? ""}
-            onChange={(wall) => goTo(setAddress(t.locale, { set: set.id, stage: stage.name, part: wall }))}
+            onChange={(wall) => goByChoice(setAddress(t.locale, { set: set.id, stage: stage.name, part: wall }), "set-wall")}
             options={walls.map((wall) => ({ value: wall, label: wall.toUpperCase() }))}
           />
         </div>
@@ -79,7 +79,7 @@ export function StageView({ set, stages, states, state, part, versions }: StageV
       <StaleNote set={set} stages={stages} state={shown} ground={ground} />
     </>
   );
-  return <StagePanel key={slot.id} set={set} stages={stages} slot={slot} core={versions[slot.calculator] ?? ""} header={header} next={next} />;
+  return <StagePanel set={set} stages={stages} slot={slot} core={versions[slot.calculator] ?? ""} header={header} next={next} />;
 }
 
 /** How a calculation within its stage is named in the address. */

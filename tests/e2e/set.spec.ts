@@ -48,14 +48,16 @@ test("a carpenter does the job stage by stage, each fed by the one before, and f
   await page.getByRole("textbox", { name: "Diagonal B-D" }).fill("427 1/16");
   await expect(page.locator(".verdict-title")).toBeVisible();
   await openStage(page, "bolts");
-  await page.getByRole("radio", { name: "BC", exact: true }).check({ force: true });
+  await page.getByRole("radio", { name: "AB", exact: true }).focus();
+  await page.keyboard.press("ArrowRight");
+  await expect(page.getByRole("radio", { name: "BC", exact: true })).toBeFocused();
   await expect(page.getByRole("textbox", { name: "Piece 1 ends" })).toHaveValue("263 1/8 in");
   await page.reload();
   await expect(page.getByRole("textbox", { name: "Piece 1 ends" })).toHaveValue("263 1/8 in");
   await overview(page);
   await expect(stageState(page, "chalk")).toHaveText("Done");
   await expect(page.locator(".stage-rail")).toContainText("27' 11 1/8\" by 21' 11 1/8\"");
-  await expect(page.locator(".set-plan svg")).toHaveAccessibleDescription(/slab edge, chalk lines/);
+  await expect(page.locator(".set-plan svg.plan")).toHaveAccessibleName(/slab edge, chalk lines/);
 });
 
 test("a reading changed later makes the chalk lines stale until the new values are used, and that can be undone @phone", async ({ page }) => {

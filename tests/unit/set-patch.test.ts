@@ -17,7 +17,7 @@ const patches: fc.Arbitrary<SetPatch> = fc.record(
   },
   { requiredKeys: [] },
 );
-const sets: fc.Arbitrary<SillSet> = fc.array(patches, { maxLength: 4 }).map((list) => list.reduce((set, patch) => applyPatch(set, patch, now), newSet("a", "Lot 14", now)));
+const sets: fc.Arbitrary<SillSet> = fc.array(patches, { maxLength: 4 }).map((list) => list.reduce<SillSet>((set, patch) => applyPatch(set, patch, now), newSet("a", "Lot 14", now)));
 
 test("a change and its inverse leave a set as it was", () =>
   fc.assert(
