@@ -13,6 +13,7 @@ import enInset from "../messages/en/inset.json";
 import enLegal from "../messages/en/legal.json";
 import enLinks from "../messages/en/links.json";
 import enSet from "../messages/en/set.json";
+import enSheet from "../messages/en/sheet.json";
 import enSquareness from "../messages/en/squareness.json";
 import esAnchors from "../messages/es/anchors.json";
 import esCautions from "../messages/es/cautions.json";
@@ -29,10 +30,11 @@ import esInset from "../messages/es/inset.json";
 import esLegal from "../messages/es/legal.json";
 import esLinks from "../messages/es/links.json";
 import esSet from "../messages/es/set.json";
+import esSheet from "../messages/es/sheet.json";
 import esSquareness from "../messages/es/squareness.json";
 import type { Locale } from "./locales";
 
-export const namespaces = ["common", "cautions", "errors", "failure", "home", "legal", "developers", "links", "set", "squareness", "footprint", "fit", "corner", "inset", "anchors", "conversions"] as const;
+export const namespaces = ["common", "cautions", "errors", "failure", "home", "legal", "developers", "links", "set", "sheet", "squareness", "footprint", "fit", "corner", "inset", "anchors", "conversions"] as const;
 export type Namespace = (typeof namespaces)[number];
 
 /** A namespace's messages as written: sentences in ICU MessageFormat under nested keys. */
@@ -50,6 +52,7 @@ export const catalogue: Readonly<Record<Locale, Readonly<Record<Namespace, Messa
     developers: enDevelopers,
     links: enLinks,
     set: enSet,
+    sheet: enSheet,
     squareness: enSquareness,
     fit: enFit,
     footprint: enFootprint,
@@ -68,6 +71,7 @@ export const catalogue: Readonly<Record<Locale, Readonly<Record<Namespace, Messa
     developers: esDevelopers,
     links: esLinks,
     set: esSet,
+    sheet: esSheet,
     squareness: esSquareness,
     fit: esFit,
     footprint: esFootprint,

@@ -1,0 +1,79 @@
+import type { LengthAnswer } from "@/calculators/schema/measure";
+import { byCorners, shownAs, unitOfInput, withLean, type Context } from "../context";
+import type { Table } from "../sheet";
+
+type Shown = string | null;
+
+/** Each pull on concrete, what the chalk must read, and what it read: with the burn in, as the tape shows it. */
+export function readingsTable(context: Context): Table | null {
+  const { t, answers, precision } = context;
+  const { square, footprint, inset, fit, recheck } = answers;
+  const rows: { name: string; concrete: Shown; expected: Shown; chalk: Shown }[] = [];
+  const shownReading = (reading: { reading: LengthAnswer | null; measured: LengthAnswer } | null | undefined): Shown => (reading == null ? null : (reading.reading ?? reading.measured).text);
+  const row = (name: string, concrete: Shown, expected: Shown, chalk: Shown) => {
+    if (concrete !== null || expected !== null || chalk !== null) rows.push({ name, concrete, expected, chalk });
+  };
+  const fitCheck = (name: string): Shown => fit?.answer.checks.find(({ from, to }) => `${from}${to}`.toLowerCase() === name)?.reading.text ?? null;
+  if (footprint === null) {
+    for (const name of ["ab", "bc", "cd", "da"] as const) row(byCorners(name), shownReading(square?.answer.readings[name]), null, shownReading(recheck?.answer.readings[name]));
+    for (const name of ["ac", "bd"] as const) {
+      const measured = inset?.answer.check?.drops?.[name] === undefined ? null : typedChalk(inset.input, name, precision);
+      row(byCorners(name), shownReading(square?.answer.readings[name]), inset?.answer.expected[name].reading.text ?? fitCheck(name), shownReading(recheck?.answer.readings[name]) ?? measured);
+    }
+    row(t("sheet.readings.difference"), square?.answer.difference.text ?? null, null, recheck?.answer.difference.text ?? null);
+  } else {
+    const known = new Map(fit?.answer.checks.map(({ from, to, reading }) => [`${from}${to}`, reading.text]));
+    for (const { from, to, reading, chalk } of footprint.answer.checks) row(byCorners(`${from}${to}`), reading.text, known.get(`${from}${to}`) ?? chalk?.reading.text ?? null, null);
+  }
+  if (rows.length === 0) return null;
+  const source = square ?? footprint ?? inset ?? fit ?? recheck;
+  const burn = typeof source?.input.burn === "string" ? shownAs(source.input.burn, precision, unitOfInput(source.input)) : null;
+  const columns = (["concrete", "expected", "chalk"] as const).filter((name) => rows.some((entry) => entry[name] !== null));
+  return {
+    kind: "table",
+    id: "readings",
+    title: t("sheet.readings.title"),
+    note: burn === null || /^0\b/.test(burn) ? t("sheet.readings.plain") : t("sheet.readings.burned", { burn }),
+    columns: [{ text: t("sheet.readings.pull"), share: 3 }, ...columns.map((name) => ({ text: t(`sheet.readings.${footprint !== null && name === "concrete" ? "mustRead" : name}`), figure: true, share: 3.4 }))],
+    rows: rows.map((entry) => [entry.name, ...columns.map((name) => entry[name] ?? "")]),
+  };
+}
+
+function typedChalk(input: Readonly<Record<string, unknown>>, name: "ac" | "bd", precision: Context["precision"]): Shown {
+  const typed = (input.chalkDiagonals as Record<string, unknown> | undefined)?.[name];
+  return typeof typed === "string" ? shownAs(typed, precision, unitOfInput(input)) : null;
+}
+
+/** Where each chalk corner is marked: from the two slab edges that meet there, square to them. */
+export function offsetsTable({ t, answers }: Context): Table | null {
+  const offsets: Readonly<Record<string, Readonly<Record<string, LengthAnswer>>>> | undefined = answers.fit?.answer.offsets ?? answers.inset?.answer.offsets;
+  if (offsets === undefined) return null;
+  return {
+    kind: "table",
+    id: "offsets",
+    title: t("sheet.offsets.title"),
+    columns: [{ text: t("sheet.offsets.corner"), share: 2.2 }, ...[1, 2].flatMap(() => [{ text: t("sheet.offsets.edge"), share: 2 }, { text: t("sheet.offsets.in"), figure: true, share: 3.4 }])],
+    rows: Object.entries(offsets).map(([corner, bySide]) => [corner, ...Object.entries(bySide).flatMap(([side, length]) => [byCorners(side), withLean(length, t)])]),
+  };
+}
+
+/** How long each chalk line is. */
+export function linesTable({ t, answers }: Context): Table | null {
+  const lines: readonly [string, string][] = Object.entries<LengthAnswer>(answers.fit?.answer.lines ?? answers.inset?.answer.lines ?? {}).map(([side, length]) => [side, withLean(length, t)]);
+  if (lines.length === 0) return null;
+  return { kind: "table", id: "lines", title: t("sheet.lines.title"), columns: [{ text: t("sheet.lines.line"), share: 1 }, { text: t("sheet.lines.length"), figure: true, share: 2 }], rows: lines.map(([side, text]) => [byCorners(side), text]) };
+}
+
+/** What goes under the plate at each reading, from the highest point. */
+export function shimsTable({ t, answers }: Context): Table | null {
+  if (answers.level === null) return null;
+  const { shims, spread } = answers.level.answer;
+  return {
+    kind: "table",
+    id: "level",
+    title: t("sheet.level.title"),
+    note: t("sheet.level.spread", { spread: spread.text }),
+    columns: [{ text: t("sheet.level.reading"), share: 1 }, { text: t("sheet.level.wall"), share: 1 }, { text: t("sheet.level.station"), figure: true, share: 2 }, { text: t("sheet.level.shim"), figure: true, share: 2 }],
+    rows: shims.map(({ index, wall, station, shim }) => [String(index + 1), wall === null ? "" : byCorners(wall), station?.text ?? "", withLean(shim, t)]),
+  };
+}
