@@ -8,6 +8,7 @@ export const systemPackages = {
   mariadb: { package: "mariadb-server", programs: ["mariadbd", "mariadb-install-db"] },
   redis: { package: "redis-server", programs: ["redis-server"] },
   chromium: { package: "chromium", programs: ["chromium"] },
+  curl: { package: "curl", programs: ["curl"] }, // the API's examples on the page are run as they stand
 };
 
 /** Debian's own way to say "install, but start nothing". */

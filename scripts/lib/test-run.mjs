@@ -24,7 +24,7 @@ export function testRun(names, { filters = [], environment: extra = {} } = {}) {
       const began = performance.now();
       await step("Disk", () => checkDisk(root));
       await step("Packages from npm", () => ensurePackages(root));
-      const services = ["mariadb", "redis", ...(names.includes("e2e") ? ["chromium"] : [])];
+      const services = ["mariadb", "redis", ...(names.includes("e2e") ? ["chromium", "curl"] : [])];
       await step("Packages from Debian", () => ensureSystemPackages(services));
       const folder = await throwawayFolder(keep);
       const { environment } = await throwawayServices(folder, keep);
