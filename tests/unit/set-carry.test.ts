@@ -1,6 +1,8 @@
 import fc from "fast-check";
 import { describe, expect, test } from "vitest";
 import { checkOperation } from "@/calculators/anchors";
+import { fitOperation } from "@/calculators/fit";
+import { footprintOperation } from "@/calculators/footprint";
 import { insetOperation } from "@/calculators/inset";
 import { platesOperation } from "@/calculators/plates";
 import { answerTo, inputFromQuery, type Operation } from "@/calculators/schema";
@@ -10,6 +12,7 @@ import { adapterOf } from "@/lib/client/set/calculations";
 import { carriedInto, changedSince, mayTakeQuietly, takingPatch } from "@/lib/client/set/carry";
 import { newSet } from "@/lib/client/set/new-set";
 import { applyPatch } from "@/lib/client/set/patch";
+import { planOf } from "@/lib/client/set/plan-layers";
 import type { SillSet } from "@/lib/client/set/schema";
 import { fingerprint, stageStates } from "@/lib/client/set/stage-state";
 import { slotsOf, stagesWith, type Slot } from "@/lib/client/set/stages";
@@ -133,6 +136,34 @@ describe("staleness", () => {
     expect(mayTakeQuietly(applyPatch(begun, { calculations: { [chalk.id]: { fields: { length: "30 ft" } } } }, now), chalk, carried)).toBe(false);
     expect(mayTakeQuietly(followed, chalk, carried)).toBe(false);
   });
+});
+
+test("an L goes from its footprint to the best fit, and on to the bolts and plates of all six walls", () => {
+  const all = stagesWith(["squareness", "footprint", "inset", "fit", "anchors", "plates"]);
+  const chosen = applyPatch(newSet("a", "L", now), { choices: { concrete: "footprint", chalk: "fit" } }, now);
+  const at = (set: SillSet, stage: string, wall?: string) => slotsOf(set, all.find(({ name }) => name === stage)!).find((known) => known.wall === wall)!;
+  const answered = (set: SillSet, place: Slot, operation: Operation, fields: Record<string, string>) => {
+    const carried = carriedInto(set, all, place)!;
+    const typedIn = applyPatch(set, { calculations: { [place.id]: { ...takingPatch(set, place, carried), fields: { ...carried, ...fields } } } }, now);
+    const calculation = typedIn.calculations[place.id]!;
+    const input = inputFromQuery(Object.entries(calculation.fields));
+    const { answer, issues } = answerTo(operation, input);
+    expect(issues).toEqual([]);
+    const adapter = adapterOf(place.calculator)!;
+    const asked = { unit: "in" as const, input, wall: place.wall };
+    return applyPatch(typedIn, { calculations: { [place.id]: { result: { operation: "", core: "", input, of: fingerprint(calculation), key: adapter.key(answer), gives: adapter.gives(answer, asked), layers: adapter.layers(answer, asked) } } } }, now);
+  };
+  const walked = answered(chosen, at(chosen, "concrete"), footprintOperation as Operation, { walk: "E 40 ft, N 20 ft, W 16 ft, N 12 ft, W 24 ft, S 32 ft", inset: "7/16" });
+  const fitted = answered(walked, at(walked, "chalk"), fitOperation as Operation, { inset: "7/16" });
+  const walls = slotsOf(fitted, all.find(({ name }) => name === "bolts")!).map(({ wall }) => wall);
+  expect(walls).toEqual(["ab", "bc", "cd", "de", "ef", "fa"]);
+  const chalk = fitted.calculations["chalk.fit"]!.result!;
+  // by hand: 40 ft less 7/16 at A and at B; 16 ft with an outside corner at C and an inside one at D keeps its length
+  expect(chalk.gives["line.ab"]).toMatch(/^479 1\/8 in$|^479\.125 in$/);
+  expect(chalk.gives["line.cd"]).toMatch(/^192(\.0+)? in$/);
+  expect(planOf(fitted, all).chalk).toHaveLength(6);
+  const plates = carriedInto(fitted, all, at(fitted, "plates"))!;
+  expect(answerTo(platesOperation as Operation, inputFromQuery(Object.entries({ ...plates, "stock.0.length": "16 ft" }))).issues).toEqual([]);
 });
 
 test("the bolts are done once every wall is", () => {

@@ -71,6 +71,24 @@ test("of two tabs that type into one field the last has it, in both", async () =
   for (const tab of [one, two]) expect(tab.find("a")?.calculations["concrete.squareness"]?.fields.length).toBe("30'");
 });
 
+test("two tabs that type at once, key by key, end with all of both", async () => {
+  const { open, records } = device();
+  const one = await open(1);
+  one.add(newSet("a", "Lot 14", now));
+  await settle();
+  const two = await open(2);
+  for (let key = 1; key <= 30; key += 1) {
+    one.change("a", typed("length", "1".repeat(key)));
+    if (key % 3 === 0) await Promise.resolve();
+    two.change("a", typed("width", "2".repeat(key)));
+    if (key % 4 === 0) await settle();
+    // what a tab typed never goes from its own screen
+    expect([one.find("a")?.calculations["concrete.squareness"]?.fields.length, two.find("a")?.calculations["concrete.squareness"]?.fields.width]).toEqual(["1".repeat(key), "2".repeat(key)]);
+  }
+  await settle();
+  for (const fields of [one.find("a"), two.find("a"), records.get("a")].map((set) => set?.calculations["concrete.squareness"]?.fields)) expect(fields).toEqual({ length: "1".repeat(30), width: "2".repeat(30) });
+});
+
 test("a full device says so, keeps what is typed on the page, and writes all of it once there is room", async () => {
   const { open, fill, records } = device();
   const store = await open(1);

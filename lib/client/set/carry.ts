@@ -20,6 +20,7 @@ function chalkSizes(chalk: Texts, walls: readonly string[]): Texts {
 
 /** The fields that each calculation takes from those before it, with the values they have now; null while those have no answer. */
 const takers: Readonly<Record<string, Taker>> = {
+  "concrete.level": ({ concrete }) => concrete && pick(concrete, { length: "length", width: "width" }),
   "chalk.inset": ({ concrete }) => concrete && pick(concrete, { length: "length", width: "width", burn: "burn", ...(concrete.tapered === "true" ? {} : { "slabDiagonals.ac": "ac", "slabDiagonals.bd": "bd" }) }),
   "chalk.fit": ({ concrete, concreteBy }) => {
     if (concrete === null) return null;
@@ -39,7 +40,7 @@ const takers: Readonly<Record<string, Taker>> = {
       ),
       ...pick(bolts(walls[0] ?? "ab") ?? {}, { rule: "rule", diameter: "diameter", plateWidth: "plateWidth" }),
     },
-  "takeoff.takeoff": ({ plates }) => plates && under(plates, "takeoff."),
+  "takeoff.takeoff": ({ plates }) => plates && Object.fromEntries(Object.entries(under(plates, "takeoff.")).map(([name, text]) => [name.slice("takeoff.".length), text])),
   "marks.marks": ({ chalk, bolts, walls }) => {
     const wall = walls[0] ?? "ab";
     const stations = Object.entries(bolts(wall) ?? {}).filter(([name]) => /^bolts\.\d+\.station$/.test(name));

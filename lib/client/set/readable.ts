@@ -1,2 +1,2 @@
 /** Calculators whose figures can be read big. */
-export const readable: readonly string[] = ["squareness", "corner", "inset", "anchors", "conversions", "footprint", "fit", "level", "plates", "marks"];
+export const readable: readonly string[] = ["squareness", "corner", "inset", "anchors", "conversions", "footprint", "fit", "level", "plates", "takeoff", "marks"];

@@ -42,6 +42,9 @@ export function createSetStore(open: (onOutdated: () => void) => Promise<SetData
   const pending = new Map<string, Change>();
   const stacks = new Map<string, UndoStack>();
   let writing: Promise<void> | null = null;
+  let inFlight: { id: string; change: Change } | null = null;
+  /** How many writes are done: what was read before one of them is out of date. */
+  let written = 0;
 
   const set = (next: Partial<SetsState>) => {
     state = { ...state, ...next };
@@ -66,9 +69,13 @@ export function createSetStore(open: (onOutdated: () => void) => Promise<SetData
     while (pending.size > 0 && database !== null && state.keeping !== "outdated") {
       const [id, change] = pending.entries().next().value!;
       pending.delete(id);
+      inFlight = { id, change };
       try {
         await write(id, change);
+        inFlight = null;
+        written += 1;
       } catch (error) {
+        inFlight = null;
         const newer = pending.get(id);
         pending.set(id, newer === undefined ? change : { put: change.put, patch: mergePatches(change.patch, newer.patch), at: newer.at });
         set({ keeping: error instanceof Error && error.name === "QuotaExceededError" ? "full" : "refused", waiting: pending.size });
@@ -93,13 +100,16 @@ export function createSetStore(open: (onOutdated: () => void) => Promise<SetData
 
   /** What another tab wrote, with what this one has not written yet on top. */
   async function reread(id: string): Promise<void> {
+    const before = written;
     const stored = await database?.get(id).catch(() => undefined);
-    const waiting = pending.get(id);
+    if (written !== before) return reread(id);
+    const mine = [...(inFlight?.id === id ? [inFlight.change] : []), ...(pending.has(id) ? [pending.get(id)!] : [])];
     if (stored === undefined) {
-      if (waiting === undefined) set({ sets: (state.sets ?? []).filter((known) => known.id !== id) });
+      if (mine.length === 0) set({ sets: (state.sets ?? []).filter((known) => known.id !== id) });
       return;
     }
-    set({ sets: withSet(waiting === undefined ? stored : applyPatch(stored, waiting.patch, waiting.at)) });
+    const whole = mine.reduce((known, { patch, at }) => applyPatch(known, patch, at), stored);
+    set({ sets: withSet(sharing(find(id), whole)) });
   }
 
   return {
@@ -151,6 +161,16 @@ export function createSetStore(open: (onOutdated: () => void) => Promise<SetData
     /** Resolves once everything is written or cannot be. */
     flush,
   };
+}
+
+/** The newer set, with the very objects of the older one wherever a calculation is the same: what did not change is not worked out again. */
+function sharing(older: SillSet | undefined, newer: SillSet): SillSet {
+  if (older === undefined) return newer;
+  const calculations = Object.entries(newer.calculations).map(([id, calculation]) => {
+    const known = older.calculations[id];
+    return [id, known !== undefined && JSON.stringify(known) === JSON.stringify(calculation) ? known : calculation] as const;
+  });
+  return { ...newer, calculations: Object.fromEntries(calculations) };
 }
 
 export type SetStore = ReturnType<typeof createSetStore>;

@@ -98,5 +98,12 @@ export function keepReport({ store, setId, slot, adapter, core }: Told, { form, 
   const result: Result | null =
     answer === null ? null : { operation: adapter.operation(answer), core, input, of: fingerprint(calculation), key: adapter.key(answer), gives: adapter.gives(answer, asked), layers: adapter.layers(answer, asked) };
   if (JSON.stringify(result) === JSON.stringify(calculation.result)) return;
+  // Tabs of two editions must not take turns: the newer one's answer to the same fields stands.
+  if (calculation.result !== null && calculation.result.of === fingerprint(calculation) && isOlder(core, calculation.result.core)) return;
   store.change(setId, { calculations: { [slot.id]: { result } } });
+}
+
+/** Whether a version such as 1.2.0 is older than another. */
+function isOlder(version: string, other: string): boolean {
+  return version.localeCompare(other, "en", { numeric: true }) < 0;
 }
