@@ -48,7 +48,19 @@ export function LengthField({ name, id = fieldId(name), value, onChange, unit, p
   const input = useRef<HTMLInputElement>(null);
   const [hasRow, setHasRow] = useState(false);
   const timer = useRef<ReturnType<typeof setTimeout>>(undefined);
-  const echo = core === null || value.trim() === "" ? null : echoOf(core, value, unit, precision, burn);
+  // What was typed shows at once; the form may take it up after the paint (lib/client/calculator/typed-text.ts).
+  const [draft, setDraft] = useState<string | null>(null);
+  const [formValue, setFormValue] = useState(value);
+  if (value !== formValue) {
+    setFormValue(value);
+    setDraft(null);
+  }
+  const shown = draft ?? value;
+  const type = (text: string) => {
+    setDraft(text);
+    onChange(text);
+  };
+  const echo = core === null || shown.trim() === "" ? null : echoOf(core, shown, unit, precision, burn);
 
   const focus = () => {
     clearTimeout(timer.current);
@@ -72,11 +84,11 @@ export function LengthField({ name, id = fieldId(name), value, onChange, unit, p
           spellCheck={false}
           maxLength={80}
           className="length-input"
-          value={value}
+          value={shown}
           aria-required={required}
           aria-invalid={texts.error ? true : undefined}
           aria-describedby={describedBy(id, texts, `${id}-echo`)}
-          onChange={(event) => onChange(event.target.value)}
+          onChange={(event) => type(event.target.value)}
           onFocus={focus}
           onBlur={blur}
         />
@@ -85,7 +97,7 @@ export function LengthField({ name, id = fieldId(name), value, onChange, unit, p
         </span>
       </div>
       <MarkKeys input={input} />
-      {blade ? <TapeBlade core={core} label={label} value={value} onChange={onChange} unit={unit} precision={precision} controls={id} /> : null}
+      {blade ? <TapeBlade core={core} label={label} value={shown} onChange={type} unit={unit} precision={precision} controls={id} /> : null}
     </Field>
   );
 }

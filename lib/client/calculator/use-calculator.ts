@@ -13,6 +13,7 @@ import { fieldId } from "./field-id";
 import { defaultPrecision, defaultUnit, queryFromForm, rowCount, withoutRow, type Fields, type FormState, type IsLength } from "./form-fields";
 import { FormHomeContext } from "./form-home";
 import { createFormStore } from "./form-store";
+import { createTypedText } from "./typed-text";
 
 /** What an answer page worked out on the server: the form as sent, and its answer or issues. */
 export interface Initial<Answer> {
@@ -52,6 +53,7 @@ export function useCalculator<AnswerSchema extends z.ZodType>({ name, load, isLe
   const { unit, precision } = useDeviceSettings();
   const home = use(FormHomeContext);
   const [store] = useState(() => home?.open({ defaults: defaults ?? {}, isLength }) ?? createFormStore(initial?.form ?? { fields: defaults ?? {}, unit: defaultUnit, precision: defaultPrecision }));
+  const [typed] = useState(() => createTypedText((fields) => store.change({ ...store.get(), fields: { ...store.get().fields, ...fields } })));
   const form = useSyncExternalStore(store.subscribe, store.get, store.getInitial);
   const [loaded, setLoaded] = useState<LoadedOperation | null>(null);
   const [focused, setFocused] = useState<string | null>(null);
@@ -61,9 +63,10 @@ export function useCalculator<AnswerSchema extends z.ZodType>({ name, load, isLe
 
   useEffect(() => afterFirstPaint(() => void loader.current().then(setLoaded, () => undefined)), []);
   useEffect(() => {
+    typed.flush();
     const settings = deviceSettings(); // not the rendered ones: the first client render still sees the defaults
     store.adopt(unitOf(settings.units), precisionOf(settings), lengthTest.current);
-  }, [store, unit, precision]);
+  }, [store, typed, unit, precision]);
 
   const deferred = useDeferredValue(form);
   const input = useMemo(() => inputOf(deferred, prepare), [deferred, prepare]);
@@ -71,6 +74,14 @@ export function useCalculator<AnswerSchema extends z.ZodType>({ name, load, isLe
     if (loaded !== null) return loaded.answerTo(loaded.operation, input) as Answered<Answer>;
     return initial?.answered ?? nothingTyped;
   }, [loaded, input, initial]);
+
+  useEffect(() => {
+    window.addEventListener("pagehide", typed.flush, true); // before the store writes the address
+    return () => {
+      window.removeEventListener("pagehide", typed.flush, true);
+      typed.flush();
+    };
+  }, [typed]);
 
   useEffect(() => {
     if (loaded !== null) home?.report({ form: deferred, input, answer: answered.answer });
@@ -91,7 +102,11 @@ export function useCalculator<AnswerSchema extends z.ZodType>({ name, load, isLe
     const issue = shown.find((candidate) => nameOf(candidate) === field);
     return issue === undefined ? undefined : sentence(issue);
   };
-  const change = (fields: Fields) => store.change({ ...store.get(), fields: { ...store.get().fields, ...fields } });
+  const changeForm = (next: (state: FormState) => FormState) => {
+    typed.flush();
+    store.change(next(store.get()));
+  };
+  const change = (fields: Fields) => changeForm((state) => ({ ...state, fields: { ...state.fields, ...fields } }));
 
   return {
     ...form,
@@ -113,20 +128,23 @@ export function useCalculator<AnswerSchema extends z.ZodType>({ name, load, isLe
     change,
     errorAt,
     rows: (list: string) => rowCount(form.fields, list),
-    removeRow: (list: string, row: number) => store.change({ ...store.get(), fields: withoutRow(store.get().fields, list, row) }),
+    removeRow: (list: string, row: number) => changeForm((state) => ({ ...state, fields: withoutRow(state.fields, list, row) })),
     /** Everything back to a fresh page. */
     reset: () => {
       setAsked(0);
-      store.change({ ...store.get(), fields: defaults ?? {} });
+      changeForm((state) => ({ ...state, fields: defaults ?? {} }));
     },
     /** Writes the address at once, for a copy of it. */
-    flush: store.flush,
+    flush: () => {
+      typed.flush();
+      store.flush();
+    },
     /** Spread on a length field: its name, text, error, unit and precision. */
     field: (field: string) => ({
       id: fieldId(field),
       name: field,
       value: form.fields[field] ?? "",
-      onChange: (text: string) => change({ [field]: text }),
+      onChange: (text: string) => typed.type(field, text),
       error: errorAt(field),
       unit: form.unit,
       precision: form.precision,
@@ -139,11 +157,15 @@ export function useCalculator<AnswerSchema extends z.ZodType>({ name, load, isLe
       autoComplete: "off",
       onSubmit: (event: FormEvent) => {
         event.preventDefault();
+        typed.flush();
         setAsked((count) => count + 1);
         store.flush();
       },
       onFocus: (event: FocusEvent) => setFocused((event.target as HTMLInputElement).name || null),
-      onBlur: () => setFocused(null),
+      onBlur: () => {
+        typed.flush();
+        setFocused(null);
+      },
     },
   };
 }
