@@ -42,7 +42,7 @@ export function CornerCalculator({ header, initial }: { header: ReactNode; initi
         </>
       }
       verdict={<CornerVerdict answer={answer} burn={held} print={print} />}
-      results={answer === null ? null : <CornerResults answer={answer} burn={held} print={print} />}
+      results={answer === null ? null : <CornerResults answer={answer} burn={held} system={form.precision.endsWith("mm") ? "metric" : "imperial"} print={print} />}
       carries={answer === null ? [] : [{ href: calculatorAddress(t.locale, "squareness", { length: `${answer.legs.first.exact} in`, width: `${answer.legs.second.exact} in`, burn }), label: t("corner.carry.check") }]}
     />
   );

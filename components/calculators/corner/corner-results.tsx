@@ -30,10 +30,10 @@ export function CornerVerdict({ answer, burn, print }: Omit<Shown, "answer"> & {
   );
 }
 
-export function CornerResults({ answer, burn, print }: Shown) {
+export function CornerResults({ answer, burn, system, print }: Shown & { system: "imperial" | "metric" }) {
   const t = useTranslate();
   const { diagonal, reading, triangle } = answer;
-  const inches = (value: number) => t("corner.results.inches", { value: value.toFixed(2) });
+  const small = (value: number) => t("corner.results.small", { system, value: system === "metric" ? (value * 25.4).toFixed(1) : value.toFixed(2) });
   return (
     <div className="squareness-columns">
       <KeyValues
@@ -49,8 +49,8 @@ export function CornerResults({ answer, burn, print }: Shown) {
                 ...(burn === "" ? [] : [{ label: t("corner.results.cReading", { burn }), value: <LengthAnswer length={triangle.reading} /> }]),
                 { label: t("corner.results.multiple"), value: t("corner.results.times", { triple: triangle.primitive.join("-"), times: triangle.times }) },
               ]),
-          { label: t("corner.results.swing"), value: inches(answer.swingIn) },
-          ...(triangle === null ? [] : [{ label: t("corner.results.triangleSwing"), value: inches(triangle.swingIn) }]),
+          { label: t("corner.results.swing"), value: small(answer.swingIn) },
+          ...(triangle === null ? [] : [{ label: t("corner.results.triangleSwing"), value: small(triangle.swingIn) }]),
         ]}
       />
       <Note title={t("corner.proves.title")}>

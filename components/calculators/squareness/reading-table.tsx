@@ -6,12 +6,15 @@ import { useTranslate } from "@/lib/client/i18n/messages-context";
 import { readings as names } from "./squareness-fields";
 
 /** Reading by reading: actual length, what the tape's own errors did to it, and what the adjustment makes of it. Left out where there is nothing to tell. */
-export function ReadingTable({ answer }: { answer: SquarenessAnswer }) {
+export function ReadingTable({ answer, system }: { answer: SquarenessAnswer; system: "imperial" | "metric" }) {
   const t = useTranslate();
   const adjusted = answer.readings.ab.adjusted !== null;
   const taped = answer.readings.ac.correctionIn !== null;
   if (!adjusted && !taped) return null;
-  const inches = (value: number) => (Math.abs(value) < 0.0005 ? "0" : `${value > 0 ? "+" : "-"}${Math.abs(value).toFixed(3)}`);
+  const signed = (inches: number) => {
+    const text = system === "metric" ? Math.abs(inches * 25.4).toFixed(1) : Math.abs(inches).toFixed(3);
+    return Number(text) === 0 ? "0" : `${inches > 0 ? "+" : "-"}${text}`;
+  };
   return (
     <section aria-labelledby="readings-title">
       <h2 id="readings-title">{t("squareness.table.title")}</h2>
@@ -23,7 +26,7 @@ export function ReadingTable({ answer }: { answer: SquarenessAnswer }) {
               <th scope="col">{t("squareness.table.reading")}</th>
               {taped ? (
                 <th scope="col" className="figure">
-                  {t("squareness.table.tape")}
+                  {t("squareness.table.tape", { system })}
                 </th>
               ) : null}
               <th scope="col" className="figure">
@@ -35,7 +38,7 @@ export function ReadingTable({ answer }: { answer: SquarenessAnswer }) {
                     {t("squareness.table.adjusted")}
                   </th>
                   <th scope="col" className="figure">
-                    {t("squareness.table.change")}
+                    {t("squareness.table.change", { system })}
                   </th>
                 </>
               ) : null}
@@ -48,14 +51,14 @@ export function ReadingTable({ answer }: { answer: SquarenessAnswer }) {
               return (
                 <tr key={name}>
                   <th scope="row">{t(`squareness.reading.${name}`)}</th>
-                  {taped ? <td className="figure num">{row.correctionIn === null ? t("squareness.table.none") : inches(row.correctionIn.total)}</td> : null}
+                  {taped ? <td className="figure num">{row.correctionIn === null ? t("squareness.table.none") : signed(row.correctionIn.total)}</td> : null}
                   <td className="figure">
                     <LengthText text={row.measured.text} />
                   </td>
                   {adjusted ? (
                     <>
                       <td className="figure">{row.adjusted === null ? null : <LengthText text={row.adjusted.text} />}</td>
-                      <td className="figure num">{row.residualIn === null ? null : inches(row.residualIn)}</td>
+                      <td className="figure num">{row.residualIn === null ? null : signed(row.residualIn)}</td>
                     </>
                   ) : null}
                 </tr>

@@ -31,7 +31,7 @@ export function SquarenessCalculator({ header, initial }: { header: ReactNode; i
       drawing={<SquarenessDrawing answer={answer} />}
       fields={<SquarenessInputs form={form} answer={answer} />}
       verdict={<SquarenessVerdict answer={answer} print={print} />}
-      results={answer === null ? null : <SquarenessResults answer={answer} burn={burnName(burnChosen(form.value, form.unit).text, t, "squareness")} print={print} />}
+      results={answer === null ? null : <SquarenessResults answer={answer} burn={burnName(burnChosen(form.value, form.unit).text, t, "squareness")} system={form.precision.endsWith("mm") ? "metric" : "imperial"} print={print} />}
       carries={answer === null ? [] : carriesOf(answer, form, t)}
     />
   );

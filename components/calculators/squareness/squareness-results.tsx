@@ -11,7 +11,7 @@ import { SuspectList } from "./suspect-list";
 const corners = ["A", "B", "C", "D"] as const;
 
 /** The figures behind the verdict, what the readings prove, and who is suspected when they cannot all be right. */
-export function SquarenessResults({ answer, burn, print }: { answer: SquarenessAnswer; burn: string; print: (text: string) => string }) {
+export function SquarenessResults({ answer, burn, system, print }: { answer: SquarenessAnswer; burn: string; system: "imperial" | "metric"; print: (text: string) => string }) {
   const t = useTranslate();
   const { rack, target, taper, readings, difference, verdict } = answer;
   const degrees = (value: number) => t("squareness.results.degrees", { value: value.toFixed(2) });
@@ -31,12 +31,12 @@ export function SquarenessResults({ answer, burn, print }: { answer: SquarenessA
         ]),
     ...shown.map((corner) => ({ key: corner, label: t("squareness.results.corner", { corner }), value: degrees(answer.corners[corner].angleDegrees) })),
   ];
-  const inches = (value: number) => t("squareness.table.inches", { value: value.toFixed(2) });
+  const small = (value: number) => t("squareness.results.small", { system, value: system === "metric" ? (value * 25.4).toFixed(1) : value.toFixed(2) });
   const items: KeyValue[] = [
     { label: t("squareness.results.difference"), value: <LengthAnswer length={difference} /> },
     ...(verdict === "contradictory" ? [] : slab),
-    { label: t(taper === null ? "squareness.results.closureTwo" : "squareness.results.closure"), value: inches(answer.closureIn) },
-    { label: t("squareness.results.closureLimit"), value: inches(answer.closureLimitIn) },
+    { label: t(taper === null ? "squareness.results.closureTwo" : "squareness.results.closure"), value: small(answer.closureIn) },
+    { label: t("squareness.results.closureLimit"), value: small(answer.closureLimitIn) },
   ];
   return (
     <>
@@ -49,7 +49,7 @@ export function SquarenessResults({ answer, burn, print }: { answer: SquarenessA
           ))}
         </Note>
       </div>
-      <ReadingTable answer={answer} />
+      <ReadingTable answer={answer} system={system} />
     </>
   );
 }
