@@ -1,5 +1,6 @@
 import { conversionsOperation } from "@/calculators/conversions";
 import { answerTo } from "@/calculators/schema";
+import * as lengthCore from "@/lib/client/core/length";
 
 /** The lazily loaded piece of the page. */
-export const loaded = { operation: conversionsOperation, answerTo };
+export const loaded = { operation: conversionsOperation, answerTo, lengthCore };

@@ -1,5 +1,6 @@
 import { cornerOperation } from "@/calculators/corner";
 import { answerTo } from "@/calculators/schema";
+import * as lengthCore from "@/lib/client/core/length";
 
 /** The lazily loaded piece of the page. */
-export const loaded = { operation: cornerOperation, answerTo };
+export const loaded = { operation: cornerOperation, answerTo, lengthCore };

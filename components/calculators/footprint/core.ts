@@ -1,5 +1,6 @@
 import { footprintOperation } from "@/calculators/footprint";
 import { answerTo } from "@/calculators/schema";
+import * as lengthCore from "@/lib/client/core/length";
 
 /** The lazily loaded piece of the page. */
-export const loaded = { operation: footprintOperation, answerTo };
+export const loaded = { operation: footprintOperation, answerTo, lengthCore };

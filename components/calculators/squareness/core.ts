@@ -1,5 +1,6 @@
 import { squarenessOperation } from "@/calculators/squareness";
 import { answerTo } from "@/calculators/schema";
+import * as lengthCore from "@/lib/client/core/length";
 
 /** The lazily loaded piece of the page. */
-export const loaded = { operation: squarenessOperation, answerTo };
+export const loaded = { operation: squarenessOperation, answerTo, lengthCore };

@@ -4,7 +4,7 @@ import { use, useDeferredValue, useEffect, useMemo, useRef, useState, useSyncExt
 import type { z } from "zod";
 import type { Answered, Issue, Operation } from "@/calculators/schema";
 import { inputFromQuery } from "@/calculators/schema/query";
-import { afterFirstPaint } from "@/lib/client/core/use-length-core";
+import { afterFirstPaint, bringLengthCore, type LengthCore } from "@/lib/client/core/use-length-core";
 import { localePath } from "@/lib/client/i18n/locales";
 import { useTranslate } from "@/lib/client/i18n/messages-context";
 import { precisionOf, unitOf } from "@/lib/client/settings/device-settings";
@@ -25,6 +25,8 @@ export interface Initial<Answer> {
 export interface LoadedOperation {
   operation: Operation;
   answerTo: (operation: Operation, request: unknown) => Answered<unknown>;
+  /** The parser and printer that the piece holds anyway, for the fields. */
+  lengthCore?: LengthCore;
 }
 
 interface Options<Answer> {
@@ -61,7 +63,19 @@ export function useCalculator<AnswerSchema extends z.ZodType>({ name, load, isLe
   const loader = useRef(load);
   const lengthTest = useRef(isLength);
 
-  useEffect(() => afterFirstPaint(() => void loader.current().then(setLoaded, () => undefined)), []);
+  useEffect(() => {
+    let callOff = () => {};
+    const coming = new Promise<LoadedOperation>((resolve, reject) => {
+      const stop = afterFirstPaint(() => void loader.current().then(resolve, reject));
+      callOff = () => {
+        stop();
+        reject(new Error("The page was left before its core was asked for"));
+      };
+    });
+    bringLengthCore(coming.then(({ lengthCore }) => lengthCore));
+    coming.then(setLoaded, () => undefined);
+    return () => callOff();
+  }, []);
   useEffect(() => {
     typed.flush();
     const settings = deviceSettings(); // not the rendered ones: the first client render still sees the defaults

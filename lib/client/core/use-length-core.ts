@@ -11,7 +11,16 @@ const listeners = new Set<() => void>();
 
 /** Fetches the core once; a lost connection leaves the way open for another try at the next mount. */
 export function loadLengthCore(): Promise<void> {
-  loading ??= import("./length").then(
+  return takeLengthCore(() => import("./length"));
+}
+
+/** A calculator's own lazy piece holds the core too: told before the fields ask for it, it spares them a second copy. `undefined` is a piece without. */
+export function bringLengthCore(coming: Promise<LengthCore | undefined>): void {
+  void takeLengthCore(async () => (await coming) ?? import("./length"));
+}
+
+function takeLengthCore(fetchCore: () => Promise<LengthCore>): Promise<void> {
+  loading ??= fetchCore().then(
     (module) => {
       core = module;
       for (const listener of listeners) listener();
