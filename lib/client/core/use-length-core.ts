@@ -3,7 +3,7 @@
 import { useEffect, useSyncExternalStore } from "react";
 import type * as lengthCore from "./length";
 
-type LengthCore = typeof lengthCore;
+export type LengthCore = typeof lengthCore;
 
 let core: LengthCore | null = null;
 let loading: Promise<void> | null = null;
