@@ -37,6 +37,7 @@ export function findSuspects(measurements: Measurements, { commonBurn, metric, c
     const closed = closedBy(name);
     if (closed === null) return [];
     const { change, corners } = closed;
+    if (Math.abs(change) < slipWithin) return []; // nearer to none than to the least blunder
     const asRead = reading ?? (typeof actual === "number" ? null : actual);
     const slips: { likely: Blunder; inches: number }[] = [
       ...burnSlips(burn.toNumber(), commonBurn.toNumber(), metric),
