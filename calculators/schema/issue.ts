@@ -23,6 +23,8 @@ export function pointerTo(path: readonly PropertyKey[]): string {
 
 /** Every fault zod found, as ours: one issue a field, in the order of the fields. */
 export function issuesOf(error: z.ZodError): Issue[] {
+  const noInput = error.issues.find((issue) => issue.path.length === 0 && issue.code === "invalid_type");
+  if (noInput !== undefined) return translate(noInput); // what is no object has no fields to speak of
   return error.issues.flatMap((issue) => translate(issue));
 }
 
