@@ -4,17 +4,25 @@ import { corner } from "./corner";
 import { fit } from "./fit";
 import { footprint } from "./footprint";
 import { inset } from "./inset";
+import { level } from "./level";
+import { marks } from "./marks";
+import { plates } from "./plates";
 import type { Calculator, Operation } from "./schema";
 import { squareness } from "./squareness";
+import { takeoff } from "./takeoff";
 
 /** Every calculator, in the order of the job. Pages, API, OpenAPI, short links and tests read this list. */
 export const calculators: readonly Calculator[] = [
   squareness,
   footprint,
+  level,
   corner,
   inset,
   fit,
   anchors,
+  plates,
+  takeoff,
+  marks,
   conversions,
 ];
 

@@ -21,7 +21,7 @@ export const marksOperation = defineOperation({
     },
     {
       id: "nineteenTwo",
-      input: { length: "16 ft", spacing: "19.2" },
+      input: { length: "9 ft", spacing: "19.2" },
       answer: { marks: [{ text: "1' 6 7/16\"" }, { text: "3' 1 5/8\"" }, { text: "4' 8 7/8\"" }, { text: "6' 4 1/16\"" }, { text: "7' 11 1/4\"" }], sheetBreaks: [{ onJoist: true }] },
       source: "domain.md section 9: 18 7/16, 37 5/8, 56 7/8, 76 1/16, 95 1/4, each rounded from zero",
     },

@@ -23,7 +23,7 @@ export const takeoffOperation = defineOperation({
     {
       id: "waste",
       input: { lumber: [{ length: "16 ft", count: 12 }], plateLength: "180 ft", bolts: 30, waste: 15 },
-      answer: { lines: [{ item: "board", quantity: 14 }, { item: "sill-sealer", quantity: 5 }, { item: "nut", quantity: 35 }] },
+      answer: { lines: [{ item: "board", quantity: 14 }, { item: "sill-sealer", quantity: 5 }, { item: "nut", quantity: 35 }, { item: "washer", quantity: 35 }, { item: "preservative" }] },
       source: "arithmetic: 12 × 0.15 is 1.8, so two spare; 3.6 × 1.15 is 4.14; 30 × 1.15 is 34.5",
     },
   ],

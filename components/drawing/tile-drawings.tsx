@@ -92,13 +92,61 @@ function FitTile() {
   );
 }
 
+function LevelTile() {
+  return (
+    <Tile>
+      <path d="M12 80V46l40 6 46 14 40-12v26z" {...slab} />
+      <path d="M8 44h134" {...chalk} strokeWidth="2.6" strokeDasharray="8 4" />
+      <path d="M98 44v22M52 44v8" stroke="var(--keel)" strokeWidth="2.6" />
+    </Tile>
+  );
+}
+
+function PlatesTile() {
+  return (
+    <Tile>
+      <rect x="10" y="30" width="78" height="28" fill="var(--timber)" stroke="var(--timber-edge)" strokeWidth="2" />
+      <rect x="92" y="30" width="50" height="28" fill="var(--timber)" stroke="var(--timber-edge)" strokeWidth="2" />
+      {[22, 54, 104, 130].map((x) => (
+        <circle key={x} cx={x} cy="44" r="4.5" fill="var(--steel)" />
+      ))}
+      <path d="M76 39v10M71 44h10" stroke="var(--chalk)" strokeWidth="2.6" />
+    </Tile>
+  );
+}
+
+function TakeoffTile() {
+  return (
+    <Tile>
+      {[62, 48, 34].map((y, index) => (
+        <rect key={y} x="12" y={y} width={96 - index * 16} height="12" fill="var(--timber)" stroke="var(--timber-edge)" strokeWidth="2" />
+      ))}
+      <circle cx="126" cy="58" r="14" fill="none" stroke="var(--steel)" strokeWidth="5" />
+    </Tile>
+  );
+}
+
+function MarksTile() {
+  return (
+    <Tile>
+      <rect x="10" y="38" width="132" height="26" fill="var(--timber)" stroke="var(--timber-edge)" strokeWidth="2" />
+      <path d="M40 30v34M76 30v34M112 30v34" stroke="var(--ink)" strokeWidth="2" />
+      <path d="M43 45l8 10m0-10-8 10M79 45l8 10m0-10-8 10M115 45l8 10m0-10-8 10" stroke="var(--keel)" strokeWidth="2.2" />
+    </Tile>
+  );
+}
+
 const tiles: Readonly<Record<string, () => ReactNode>> = {
   squareness: SquarenessTile,
   footprint: FootprintTile,
+  level: LevelTile,
   corner: CornerTile,
   inset: InsetTile,
   fit: FitTile,
   anchors: AnchorsTile,
+  plates: PlatesTile,
+  takeoff: TakeoffTile,
+  marks: MarksTile,
   conversions: ConversionsTile,
 };
 

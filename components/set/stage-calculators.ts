@@ -11,4 +11,8 @@ export const stageCalculators: Readonly<Record<string, () => Promise<StageCalcul
   inset: () => import("@/components/calculators/inset/inset-calculator").then((module) => module.InsetCalculator),
   fit: () => import("@/components/calculators/fit/fit-calculator").then((module) => module.FitCalculator),
   anchors: () => import("@/components/calculators/anchors/anchors-calculator").then((module) => module.AnchorsCalculator),
+  level: () => import("@/components/calculators/level/level-calculator").then((module) => module.LevelCalculator),
+  plates: () => import("@/components/calculators/plates/plates-calculator").then((module) => module.PlatesCalculator),
+  takeoff: () => import("@/components/calculators/takeoff/takeoff-calculator").then((module) => module.TakeoffCalculator),
+  marks: () => import("@/components/calculators/marks/marks-calculator").then((module) => module.MarksCalculator),
 };

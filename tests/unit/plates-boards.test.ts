@@ -4,7 +4,7 @@ import type { BoardKind, BoardProblem } from "@/calculators/plates/boards/board-
 import { materialBound } from "@/calculators/plates/boards/material-bound";
 import { planBoards, type BoardsAnswer } from "@/calculators/plates/boards/plan-boards";
 import type { JointWindows } from "@/calculators/plates/joints/joint-chains";
-import { cuttingStockCases } from "@/tests/reference/cutting-stock-cases";
+import { cuttingStockCases } from "@/tests/reference/plates-rows";
 import { runs } from "@/tests/setup/runs";
 import { bestByHighs } from "@/tests/reference/cutting-judge";
 

@@ -3,6 +3,7 @@ import { describe, expect, test } from "vitest";
 import { checkOperation } from "@/calculators/anchors";
 import { planSill, platesInput, platesOperation, type PlatesAnswer } from "@/calculators/plates";
 import { answerTo } from "@/calculators/schema";
+import { bitRows } from "@/tests/reference/plates-rows";
 import { runs } from "@/tests/setup/runs";
 
 const ask = (request: object) => answerTo(platesOperation, request);
@@ -31,17 +32,9 @@ describe("holes", () => {
     expect(second.holes.every((hole) => hole.across === null)).toBe(true);
   });
 
-  test.each([
-    { id: "B19", diameter: "1/2", bit: "17/32", warning: null },
-    { id: "B19", diameter: "1/2", bit: "9/16", warning: null },
-    { id: "B20", diameter: "5/8", bit: "11/16", warning: null },
-    { id: "B21", diameter: "1/2", bit: "3/4", warning: "hole-too-big" },
-    { id: "B19", diameter: "1/2", bit: "1/2", warning: "hole-too-small" },
-  ])("$id: a $bit bit for a $diameter bolt is answered $warning", ({ diameter, bit, warning }) => {
+  test.each(bitRows)("$id: a $bit bit for a $diameter bolt is answered $warning", ({ diameter, bit, warning, least, most }) => {
     const answer = planned({ pieces: [{ length: "8 ft" }], stock: sixteens, diameter, bit });
-    expect(answer.bit.warning).toBe(warning);
-    if (diameter === "1/2") expect([answer.hole.least.exact, answer.hole.most.exact]).toEqual(["17/32", "9/16"]);
-    else expect([answer.hole.least.exact, answer.hole.most.exact]).toEqual(["21/32", "11/16"]);
+    expect([answer.bit.warning, answer.hole.least.exact, answer.hole.most.exact]).toEqual([warning, least, most]);
   });
 });
 

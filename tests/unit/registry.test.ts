@@ -21,7 +21,7 @@ function messageAt(tree: MessageTree | string | undefined, key: string): string 
 
 describe("the registry", () => {
   test("lists what is built, in the order of the job, each once", () => {
-    expect(calculators.map(({ name }) => name)).toEqual(["squareness", "footprint", "corner", "inset", "fit", "anchors", "conversions"]);
+    expect(calculators.map(({ name }) => name)).toEqual(["squareness", "footprint", "level", "corner", "inset", "fit", "anchors", "plates", "takeoff", "marks", "conversions"]);
     const stages = calculators.flatMap(({ stage }) => (stage === null ? [] : [stage]));
     expect(stages).toEqual([...stages].sort((a, b) => a - b));
     for (const stage of stages) expect(stage).toSatisfy((value: number) => Number.isInteger(value) && value >= 1 && value <= 7);
@@ -35,7 +35,7 @@ describe("the registry", () => {
       expect(operations.get(operation.path)).toBe(operation);
       expect(calculatorOf(operation.path)).toBe(calculator);
     }
-    expect([...operations.keys()].sort()).toEqual(["anchors/check", "anchors/layout", "conversions", "corners", "fits", "footprints", "insets", "squareness"]); // product.md's table
+    expect([...operations.keys()].sort()).toEqual(["anchors/check", "anchors/layout", "conversions", "corners", "fits", "footprints", "insets", "levels", "marks", "plates", "squareness", "takeoffs"]); // product.md's table
   });
 
   // A new calculator is a folder, a line in the registry, a reference file and a page text: style.md

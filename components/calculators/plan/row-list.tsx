@@ -20,10 +20,12 @@ interface RowListProps {
   children: (row: number) => ReactNode;
   /** Rows that a browser without script gets beside these. */
   blanks?: ReactNode;
+  /** Below the list: another way to fill it. */
+  after?: ReactNode;
 }
 
 /** Rows that can be added and taken away; a new one takes focus. */
-export function RowList({ form, list, title, rows, most, first, add, remove, fresh, children, blanks }: RowListProps) {
+export function RowList({ form, list, title, rows, most, first, add, remove, fresh, children, blanks, after }: RowListProps) {
   const grow = () => {
     form.change({ [`${list}.${rows}.${first}`]: "", ...fresh?.(rows) });
     requestAnimationFrame(() => document.getElementById(fieldId(`${list}.${rows}.${first}`))?.focus());
@@ -45,6 +47,7 @@ export function RowList({ form, list, title, rows, most, first, add, remove, fre
       <Button kind="ghost" small className="no-print" onClick={grow} disabled={rows >= most}>
         {add}
       </Button>
+      {after}
     </fieldset>
   );
 }

@@ -14,6 +14,10 @@ import enLegal from "../messages/en/legal.json";
 import enLinks from "../messages/en/links.json";
 import enSet from "../messages/en/set.json";
 import enSheet from "../messages/en/sheet.json";
+import enLevel from "../messages/en/level.json";
+import enPlates from "../messages/en/plates.json";
+import enTakeoff from "../messages/en/takeoff.json";
+import enMarks from "../messages/en/marks.json";
 import enSquareness from "../messages/en/squareness.json";
 import esAnchors from "../messages/es/anchors.json";
 import esCautions from "../messages/es/cautions.json";
@@ -31,10 +35,14 @@ import esLegal from "../messages/es/legal.json";
 import esLinks from "../messages/es/links.json";
 import esSet from "../messages/es/set.json";
 import esSheet from "../messages/es/sheet.json";
+import esLevel from "../messages/es/level.json";
+import esPlates from "../messages/es/plates.json";
+import esTakeoff from "../messages/es/takeoff.json";
+import esMarks from "../messages/es/marks.json";
 import esSquareness from "../messages/es/squareness.json";
 import type { Locale } from "./locales";
 
-export const namespaces = ["common", "cautions", "errors", "failure", "home", "legal", "developers", "links", "set", "sheet", "squareness", "footprint", "fit", "corner", "inset", "anchors", "conversions"] as const;
+export const namespaces = ["common", "cautions", "errors", "failure", "home", "legal", "developers", "links", "set", "sheet", "squareness", "footprint", "fit", "corner", "inset", "anchors", "conversions", "level", "plates", "takeoff", "marks"] as const;
 export type Namespace = (typeof namespaces)[number];
 
 /** A namespace's messages as written: sentences in ICU MessageFormat under nested keys. */
@@ -60,6 +68,10 @@ export const catalogue: Readonly<Record<Locale, Readonly<Record<Namespace, Messa
     inset: enInset,
     anchors: enAnchors,
     conversions: enConversions,
+    marks: enMarks,
+    takeoff: enTakeoff,
+    plates: enPlates,
+    level: enLevel,
   },
   es: {
     common: esCommon,
@@ -79,5 +91,9 @@ export const catalogue: Readonly<Record<Locale, Readonly<Record<Namespace, Messa
     inset: esInset,
     anchors: esAnchors,
     conversions: esConversions,
+    marks: esMarks,
+    takeoff: esTakeoff,
+    plates: esPlates,
+    level: esLevel,
   },
 };

@@ -15,3 +15,12 @@ export const cuttingStockCases: readonly { id: string; name: string; capacity: n
   { id: "C03", name: "u120_00", capacity: 150, sizes: u120.split(" ").map(Number), best: 48 },
   { id: "C04", name: "the 5600 mm roll", capacity: 5600, sizes: roll.flatMap(([width, count]) => new Array<number>(count).fill(width)), best: 73 },
 ];
+
+/** B19 to B21: holes by the NDS (second-hand), 1/32 to 1/16 in over the bolt. */
+export const bitRows = [
+  { id: "B19", diameter: "1/2", bit: "17/32", warning: null, least: "17/32", most: "9/16" },
+  { id: "B19", diameter: "1/2", bit: "9/16", warning: null, least: "17/32", most: "9/16" },
+  { id: "B19", diameter: "1/2", bit: "1/2", warning: "hole-too-small", least: "17/32", most: "9/16" },
+  { id: "B20", diameter: "5/8", bit: "11/16", warning: null, least: "21/32", most: "11/16" },
+  { id: "B21", diameter: "1/2", bit: "3/4", warning: "hole-too-big", least: "17/32", most: "9/16" },
+] as const;

@@ -1,0 +1,48 @@
+import { planSill, platesInput, type PlatesAnswer } from "@/calculators/plates";
+import { CalculationError, issuesOf, type Answered } from "@/calculators/schema";
+
+/** What the page asks: a request as the API takes it, and how many seconds may go into it. */
+export interface PlanRequest {
+  key: string;
+  request: unknown;
+  seconds: number;
+}
+
+export type PlanMessage =
+  | { key: string; kind: "progress"; stage: 1 | 2; share: number; cost: number | null }
+  /** An answer; `final` when no better one will follow. */
+  | { key: string; kind: "answer"; answered: Answered<PlatesAnswer>; final: boolean };
+
+/** A first plan comes soon; then the search begins anew with four times the time, until it is proved best or the time is used. */
+const firstSeconds = 0.25;
+const progressEvery = 80;
+
+const tell = (message: PlanMessage) => postMessage(message);
+
+addEventListener("message", ({ data }: MessageEvent<PlanRequest>) => {
+  const { key, request, seconds } = data;
+  const parsed = platesInput.safeParse(request);
+  if (!parsed.success) return tell({ key, kind: "answer", answered: { answer: null, issues: issuesOf(parsed.error) }, final: true });
+  let told = 0;
+  for (let time = Math.min(firstSeconds, seconds); ; time = Math.min(seconds, time * 4)) {
+    const isLast = time >= seconds;
+    try {
+      const answer = planSill(
+        { ...parsed.data, timeLimit: time },
+        {
+          onProgress: ({ stage, share, cost }) => {
+            if (performance.now() - told < progressEvery) return;
+            told = performance.now();
+            tell({ key, kind: "progress", stage, share: share * (time / seconds), cost: cost === undefined || !Number.isFinite(cost) ? null : cost });
+          },
+        },
+      );
+      const final = isLast || answer.ended !== "time";
+      tell({ key, kind: "answer", answered: { answer, issues: [] }, final });
+      if (final) return;
+    } catch (error) {
+      if (!(error instanceof CalculationError)) throw error;
+      return tell({ key, kind: "answer", answered: { answer: null, issues: error.issues }, final: true });
+    }
+  }
+});
