@@ -1,6 +1,7 @@
 "use client";
 
 import { useEffect } from "react";
+import { SheetActions } from "@/components/sheet/sheet-actions";
 import { Button } from "@/components/ui/button";
 import { useTranslate } from "@/lib/client/i18n/messages-context";
 import { duplicateOf } from "@/lib/client/set/new-set";
@@ -64,6 +65,7 @@ export function SetView({ set, stages, place, versions }: SetViewProps) {
           <Button small kind="ghost" onClick={undo} disabled={undoable === null}>
             {undoable === null ? t("set.actions.undo") : t(`set.undo.${undoable.what}`)}
           </Button>
+          <SheetActions set={set} />
           <Button small kind="ghost" onClick={() => saveSetFile(set)}>
             {t("set.actions.export")}
           </Button>

@@ -74,7 +74,7 @@ export async function writeServiceWorker(root, nextFolder, publicFolder) {
       },
     ],
   });
-  const icons = await getManifest({ globDirectory: publicFolder, globPatterns: ["icons/*.{svg,png}"], manifestTransforms: [(entries) => ({ manifest: entries.map((entry) => ({ ...entry, url: `/${entry.url}` })), warnings: [] })] });
+  const icons = await getManifest({ globDirectory: publicFolder, globPatterns: ["icons/*.{svg,png}", "fonts/*.ttf"], manifestTransforms: [(entries) => ({ manifest: entries.map((entry) => ({ ...entry, url: `/${entry.url}` })), warnings: [] })] });
   const entries = [...manifestEntries, ...icons.manifestEntries].map(({ url, revision }) => ({ url, revision })).sort((a, b) => (a.url < b.url ? -1 : 1));
   await bundle({
     entryPoints: [path.join(root, "lib", "client", "offline", "service-worker.ts")],
@@ -93,7 +93,7 @@ export async function writeServiceWorker(root, nextFolder, publicFolder) {
 
 function bytesOf(nextFolder, publicFolder, url) {
   if (url.startsWith("/_next/")) return readFileSync(path.join(nextFolder, url.slice("/_next/".length)));
-  if (url.startsWith("/icons/")) return readFileSync(path.join(publicFolder, url));
+  if (/^\/(?:icons|fonts)\//.test(url)) return readFileSync(path.join(publicFolder, url));
   const inner = url === "/" ? "/en" : /^\/(?:es(?:\/|$)|manifest)/.test(url) ? url : `/en${url}`;
   for (const ending of [".html", ".body"]) {
     try {

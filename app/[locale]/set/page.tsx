@@ -27,7 +27,7 @@ export default async function SetsPage(props: LocaleProps) {
   );
   return (
     <main id="main" tabIndex={-1}>
-      <MessagesProvider locale={locale} messages={loadMessages(locale, ["set"], sentToBrowser)}>
+      <MessagesProvider locale={locale} messages={loadMessages(locale, ["set", "sheet"], [...sentToBrowser, "sheet.actions."])}>
         <Suspense
           fallback={
             <div className="set-start">

@@ -1,4 +1,4 @@
-import { parseLength, printLength, type Length, type LengthUnit, type Precision } from "@/calculators/length";
+import { parseLength, printLength, type LengthStyle, type LengthUnit, type Precision } from "@/calculators/length";
 import type { LengthAnswer } from "@/calculators/schema/measure";
 import type { Translate } from "@/lib/client/i18n/translate";
 import type { SillSet } from "@/lib/client/set/schema";
@@ -26,16 +26,18 @@ export const byCorners = (name: string) => (/^[a-z]{2}$/i.test(name) ? [...name.
 /** With what the graduation hides: `1/2" strong`. */
 export const withLean = ({ text, lean }: Pick<LengthAnswer, "text" | "lean">, t: Translate) => (lean === "exact" ? text : `${text} ${t(`common.lean.${lean}`)}`);
 
-/** A running figure as a tape that counts inches shows it, without its mark: `183 1/2`, or `4661` in millimetres. The unit is told once, beside. */
-export function runningFigure({ in: inches, exact }: Pick<LengthAnswer, "in" | "exact">, precision: Precision): string {
-  const value: Length | number = exact === null ? inches : parseLength(`${exact} in`);
-  return printLength(value, precision, "inches").replace(/"$| mm$/, "");
+/** A reading as a tape that counts inches shows it: `428 9/16"`. */
+export function onTape({ in: inches, exact }: Pick<LengthAnswer, "in" | "exact">, precision: Precision): string {
+  return printLength(exact === null ? inches : parseLength(`${exact} in`), precision, "inches");
 }
 
+/** A running figure as a tape that counts inches shows it, without its mark: `183 1/2`, or `4661` in millimetres. The unit is told once, beside. */
+export const runningFigure = (length: Pick<LengthAnswer, "in" | "exact">, precision: Precision) => onTape(length, precision).replace(/"$| mm$/, "");
+
 /** A length typed or published, in the sheet's own form; as it stands where it cannot be read. */
-export function shownAs(text: string, precision: Precision, unit: LengthUnit = "in"): string {
+export function shownAs(text: string, precision: Precision, unit: LengthUnit = "in", style: LengthStyle = "feet-inches"): string {
   try {
-    return printLength(parseLength(text, unit), precision);
+    return printLength(parseLength(text, unit), precision, style);
   } catch {
     return text;
   }

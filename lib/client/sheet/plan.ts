@@ -9,7 +9,9 @@ const imperial: readonly { ratio: number; inch: string }[] = [
 ];
 const metricRatios = [10, 20, 25, 50, 75, 100, 125, 150, 200, 250, 300, 400, 500, 1000];
 const timesSteps = [200, 100, 50, 20, 10, 5, 2, 1];
-const room = { left: 40, right: 34, top: 30, bottom: 62 };
+const room = { left: 24, right: 24, top: 26, bottom: 50 };
+/** A letter stands outside its corner, or inside where the plan turns in: there the sides' figures have the room. */
+const letter = { outside: 13, inside: 24 };
 const plateDepth = 5;
 const points = 72;
 
@@ -51,8 +53,7 @@ export function planPart({ set, stages, t, precision, metric }: Context, width: 
   if (drawnChalk !== undefined) items.push({ kind: "line", role: "chalk", closed: true, points: drawnChalk });
   for (const { wall, station } of plan.joists ?? []) items.push({ kind: "line", role: "joist", closed: false, points: [on(wall, station, -4), on(wall, station, plateDepth + 4)] });
   for (const { wall, station, tone } of plan.bolts ?? []) items.push({ kind: "mark", shape: tone, at: on(wall, station, plateDepth / 2) });
-  const middle: Pair = [drawnSlab.reduce((sum, [x]) => sum + x, 0) / drawnSlab.length, drawnSlab.reduce((sum, [, y]) => sum + y, 0) / drawnSlab.length];
-  drawnSlab.forEach(([x, y], index) => items.push({ kind: "text", text: String.fromCharCode(65 + index), at: [x + (x < middle[0] ? -10 : 10), y + (y < middle[1] ? -6 : 15)], anchor: "middle", size: 13, font: "heading" }));
+  drawnSlab.forEach((corner, index) => items.push({ kind: "text", text: String.fromCharCode(65 + index), at: letterAt(drawnSlab.at(index - 1)!, corner, drawnSlab[(index + 1) % drawnSlab.length]!), anchor: "middle", size: 13, font: "heading" }));
   slab.forEach((from, index) => items.push(...sideText(from, slab[(index + 1) % slab.length]!)));
 
   const bar = metric ? { inches: barOf([500, 1000, 2000, 5000, 10000], 25.4), } : { inches: barOf([2, 4, 8, 10, 20, 40], 1 / 12) };
@@ -93,6 +94,16 @@ export function planPart({ set, stages, t, precision, metric }: Context, width: 
     const upright = dx > 1e-9 || (Math.abs(dx) <= 1e-9 && dy < 0) ? 1 : -1;
     const out = upright === 1 ? 13 : 7; // the baseline stands nearer when the letters' feet look at the slab
     return [{ kind: "text", text, at: [(a[0] + b[0]) / 2 - dy * out, (a[1] + b[1]) / 2 + dx * out], anchor: "middle", size: 8.5, font: "figure", turn: (Math.atan2(dy * upright, dx * upright) * 180) / Math.PI }];
+  }
+
+  function letterAt(before: Pair, [x, y]: Pair, after: Pair): Pair {
+    const unit = ([dx, dy]: Pair): Pair => [dx / (Math.hypot(dx, dy) || 1), dy / (Math.hypot(dx, dy) || 1)];
+    const [one, other] = [unit([before[0] - x, before[1] - y]), unit([after[0] - x, after[1] - y])];
+    const inward = unit([one[0] + other[0], one[1] + other[1]]);
+    // With y downward a corner of a counter-clockwise plan turns out when this is positive.
+    const turnsOut = one[0] * other[1] - one[1] * other[0] > 0;
+    const away = turnsOut ? -letter.outside : -letter.inside;
+    return [x + inward[0] * away, y + inward[1] * away + 4.5];
   }
 
   /** The longest round length that takes no more than half of the slab. */

@@ -1,12 +1,13 @@
 import { operations as everyOperation } from "@/calculators";
 import { isMetric, type Precision } from "@/calculators/length";
 import type { Operation } from "@/calculators/schema";
+import { queryFromInput } from "@/calculators/schema/query";
 import type { Translate } from "@/lib/client/i18n/translate";
 import { hashOf } from "@/lib/client/set/hash";
 import type { SillSet } from "@/lib/client/set/schema";
 import { stageStates } from "@/lib/client/set/stage-state";
 import type { Stage } from "@/lib/client/set/stages";
-import { answersOf } from "./answers";
+import { answersOf, type Answers } from "./answers";
 import { contextOf } from "./context";
 import { sheetAddress } from "./packed-set";
 import { planPart } from "./plan";
@@ -14,11 +15,11 @@ import { findingsSections, ruleSection, wallsSection } from "./sections/bolts";
 import { cautionsSection, marksSections, takeoffSection } from "./sections/lists";
 import { boardsSection, piecesSection } from "./sections/pieces";
 import { linesTable, offsetsTable, readingsTable, shimsTable } from "./sections/readings";
-import { contentWidth, type Paper, type Section, type Sheet, type SignOff } from "./sheet";
+import { contentWidth, gap, planShare, type Paper, type Section, type Sheet, type SignOff } from "./sheet";
 
 export interface SheetOptions {
   stages: readonly Stage[];
-  /** With the namespaces of `sheetNamespaces`. */
+  /** With the namespaces of sheet-texts.ts. */
   t: Translate;
   /** Carries the units too: `1/16` or `1mm`. */
   precision: Precision;
@@ -29,14 +30,6 @@ export interface SheetOptions {
   origin: string;
   operations?: ReadonlyMap<string, Operation>;
 }
-
-/** What a translator of the sheet must know. */
-export const sheetNamespaces = ["common", "sheet", "anchors", "cautions"] as const;
-export const sheetKeys = ["common.name", "common.lean.", "common.sourceStatus.", "common.cautionsTitle", "sheet.", "anchors.code.", "anchors.findings.", "anchors.remedy.", "anchors.rule.", "anchors.figure.", "anchors.additions.", "anchors.table.", "cautions."];
-
-/** The share of the width that the plan takes; the short tables stand beside it. */
-export const planShare = 0.56;
-export const gap = 18;
 
 /**
  * The field sheet of a set: all its words and figures, worked out anew at the sheet's precision. Stages the set does not have are left out.
@@ -61,7 +54,7 @@ export function sheetOf(set: SillSet, { stages, t, precision, paper, now, origin
       { label: t("sheet.facts.date"), text: t("sheet.facts.dateText", { date: now }) },
       { label: t("sheet.facts.revision"), text: t("sheet.facts.revisionText", { date: new Date(set.changed), mark: revisionOf(set) }) },
     ],
-    warnings: warningsOf(set, stages, t),
+    warnings: [...warningsOf(set, stages, t), ...(sameAsStage(set, answers) ? [] : [t("sheet.differs")])],
     plan,
     beside,
     sections: [...sections, cautionsSection(context), signOff(t)],
@@ -73,12 +66,25 @@ export function sheetOf(set: SillSet, { stages, t, precision, paper, now, origin
 
 /** The same inputs have the same mark, on any device: two printed sheets can be told apart at a glance. */
 function revisionOf(set: SillSet): string {
-  const asked = Object.entries(set.calculations).map(([slot, { result, unit }]): [string, string] => [slot, JSON.stringify([result?.input ?? null, unit])]);
+  const asked = Object.entries(set.calculations).flatMap(([slot, { result }]) => (result === null ? [] : [...queryFromInput(result.input)].map(([name, text]): [string, string] => [`${slot} ${name}`, text])));
   return hashOf(Object.fromEntries(asked), JSON.stringify(Object.entries(set.choices).sort())).slice(0, 5);
 }
 
+/** One sentence a kind, with the stages it is about. */
 function warningsOf(set: SillSet, stages: readonly Stage[], t: Translate): string[] {
-  return stageStates(set, stages).flatMap(({ stage, state }) => (state === "stale" ? [t("sheet.stale", { stage: t(`sheet.stage.${stage.name}`) })] : state === "look" ? [t("sheet.look", { stage: t(`sheet.stage.${stage.name}`) })] : []));
+  const states = stageStates(set, stages);
+  return (["stale", "look"] as const).flatMap((kind) => {
+    const names = states.filter(({ state }) => state === kind).map(({ stage }) => t(`sheet.stage.${stage.name}`));
+    return names.length === 0 ? [] : [t(`sheet.${kind}`, { stages: names.join(", ") })];
+  });
+}
+
+/** A search that ran out of time may end elsewhere on another device: pieces printed must be those the crew saw in the stage. */
+function sameAsStage(set: SillSet, { plates }: Answers): boolean {
+  const seen = set.calculations["plates.plates"]?.result?.layers.pieces;
+  if (plates === null || seen === undefined) return true;
+  const found = plates.answer.pieces.filter(({ wall }) => wall !== null);
+  return found.length === seen.length && found.every(({ wall, from, to }) => seen.some((piece) => piece.wall === wall && Math.abs(piece.from - (from?.in ?? NaN)) < 1e-6 && Math.abs(piece.to - (to?.in ?? NaN)) < 1e-6));
 }
 
 const signOff = (t: Translate): SignOff => ({ kind: "signOff", id: "sign-off", title: t("sheet.signOff.title"), lines: ["laidOut", "checked", "accepted"].map((who) => t(`sheet.signOff.${who}`)) });

@@ -98,3 +98,7 @@ export interface Sheet {
 }
 
 export const contentWidth = (paper: Paper) => papers[paper].width - 2 * margin;
+
+/** The share of the width that the plan takes; the short tables stand beside it. */
+export const planShare = 0.58;
+export const gap = 18;

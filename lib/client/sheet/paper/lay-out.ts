@@ -1,6 +1,5 @@
-import { margin, papers, type PlanPart, type Sheet } from "../sheet";
-import { gap, planShare } from "../sheet-of";
-import { sectionBlocks, tableBlocks } from "./section-blocks";
+import { gap, margin, papers, type PlanPart, type Sheet } from "../sheet";
+import { sectionBlocks, sizeThatFits, tableBlocks } from "./section-blocks";
 import { space, stack, typesetter, type Block, type Measure, type Placed, type Typesetter } from "./typesetter";
 
 /** The sheet on its pages: where every word, rule and drawing stands. Pure but for what `measure` says of the fonts. */
@@ -70,10 +69,8 @@ function titleBlock(set: Typesetter, { title, facts, warnings }: Sheet, width: n
         return [set.text(left, y + 9, label, "text", 8.5, "soft"), ...(text === null ? [{ kind: "rule" as const, x: left, y: y + 24, width: own, thickness: 0.7, ink: "ink" as const }] : [set.text(left, y + 22, set.wrap(text, "bold", 10, own)[0] ?? "", "bold", 10)])];
       }),
   };
-  const warned = warnings.map((warning): Block => {
-    const words = set.paragraph(warning, width - 34, { font: "bold", size: 10, after: 0 });
-    return { height: words.height + 12, place: (x, y) => [{ kind: "box", x, y: y + 2, width, height: words.height + 7 }, set.text(x + 9, y + 16, "!", "heading", 13), ...words.place(x + 24, y + 5)] };
-  });
+  const told = stack(warnings.map((warning) => set.paragraph(warning, width - 34, { font: "bold", size: 10, after: 1 })));
+  const warned: Block[] = warnings.length === 0 ? [] : [{ height: told.height + 12, place: (x, y) => [{ kind: "box", x: x + 0.8, y: y + 2, width: width - 1.6, height: told.height + 6 }, set.text(x + 10, y + 16.5, "!", "heading", 13), ...told.place(x + 24, y + 5)] }];
   const rule: Block = { height: 10, place: (x, y) => [{ kind: "rule", x, y: y + 2, width, thickness: 2, ink: "ink" }] };
   return stack([titles, factRow, ...warned, rule]);
 }
@@ -86,8 +83,9 @@ function planRow(set: Typesetter, sheet: Sheet, plan: PlanPart, width: number, r
   const rest: Sheet["beside"][number][] = [];
   let high = 0;
   for (const table of sheet.beside) {
-    const block = stack([...(tables.length === 0 ? [] : [space(12)]), ...tableBlocks(set, table, rightWidth, 9)]);
-    if (rest.length > 0 || high + block.height > Math.max(left.height + 40, Math.min(room, 440))) rest.push(table);
+    const size = sizeThatFits(set, table, rightWidth, [9, 8.5, 8]);
+    const block = stack([...(tables.length === 0 ? [] : [space(12)]), ...tableBlocks(set, table, rightWidth, size ?? 8)]);
+    if (size === null || rest.length > 0 || high + block.height > Math.max(left.height + 40, Math.min(room, 440))) rest.push(table);
     else {
       tables.push(block);
       high += block.height;
@@ -113,7 +111,7 @@ function planBlock(set: Typesetter, { drawing, scale, notes, legend }: PlanPart)
 
 /** Sign-off lines, and beside them the code that brings the same inputs to a phone. */
 function endBlock(set: Typesetter, { sections, code }: Sheet, width: number, codeModules: (text: string) => number): Block {
-  const size = Math.min(200, Math.max(84, (codeModules(code.address) + 8) * 1.0)); // about 0.35 mm a module at least: what a phone reads from a hand's length
+  const size = Math.min(200, Math.max(84, (codeModules(code.address) + 8) * 1.1)); // about 0.39 mm a module: what a phone reads from a hand's length
   const leftWidth = width - size - 28;
   const signOff = sections.filter(({ kind }) => kind === "signOff").flatMap((section) => sectionBlocks(set, section, leftWidth));
   const signs = stack(signOff);

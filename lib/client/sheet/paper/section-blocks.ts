@@ -25,7 +25,7 @@ export function sectionBlocks(set: Typesetter, section: Section, width: number):
 export function tableBlocks(set: Typesetter, { title, note, columns, rows }: Table, width: number, size = 9.5): Block[] {
   const head = headBlock(set, title, note === undefined ? [] : [note], width);
   if (columns.length === 0) return [{ ...head, withNext: false }];
-  const pad = 8;
+  const pad = size < 9.5 ? 6 : 8;
   const widths = columnWidths(set, { columns, rows }, width, size, pad);
   const lefts = widths.map((_, index) => widths.slice(0, index).reduce((sum, own) => sum + own, 0));
   const rowBlock = (cells: readonly string[], bold: boolean): Block => {
@@ -52,20 +52,29 @@ export function tableBlocks(set: Typesetter, { title, note, columns, rows }: Tab
   return [head, names, ...rows.map((cells) => ({ ...rowBlock(cells, false), again: names }))];
 }
 
+/** The largest of some sizes at which no figure of the table is broken; null when even the least is too wide. */
+export function sizeThatFits(set: Typesetter, { columns, rows }: Table, width: number, sizes: readonly number[]): number | null {
+  return sizes.find((size) => leastWidths(set, { columns, rows }, size, 6).reduce((sum, own) => sum + own, 0) <= width) ?? null;
+}
+
 /** Columns as wide as their shares ask, but no figure is broken while another column has room to give. */
 function columnWidths(set: Typesetter, { columns, rows }: Pick<Table, "columns" | "rows">, width: number, size: number, pad: number): number[] {
   const all = columns.reduce((sum, { share }) => sum + share, 0);
   const asked = columns.map(({ share }) => (share / all) * width);
-  const least = columns.map(({ text, figure }, column) => {
-    const cells = rows.map((row) => (figure ? set.width(row[column] ?? "", "figure", size) : Math.max(0, ...(row[column] ?? "").split(" ").map((word) => set.width(word, column === 0 ? "bold" : "text", size)))));
-    const words = text.split(" ").map((word) => set.width(word, "bold", size));
-    return Math.max(...cells, ...words, 0) + (column === columns.length - 1 ? 0.5 : pad + 0.5);
-  });
+  const least = leastWidths(set, { columns, rows }, size, pad);
   const lacking = least.map((need, index) => Math.max(0, need - asked[index]!));
   const spare = asked.map((own, index) => Math.max(0, own - least[index]!));
   const [lack, give] = [lacking.reduce((sum, own) => sum + own, 0), spare.reduce((sum, own) => sum + own, 0)];
   const taken = give === 0 ? 0 : Math.min(1, lack / give);
   return asked.map((own, index) => own + lacking[index]! - spare[index]! * taken);
+}
+
+function leastWidths(set: Typesetter, { columns, rows }: Pick<Table, "columns" | "rows">, size: number, pad: number): number[] {
+  return columns.map(({ text, figure }, column) => {
+    const cells = rows.map((row) => (figure ? set.width(row[column] ?? "", "figure", size) : Math.max(0, ...(row[column] ?? "").split(" ").map((word) => set.width(word, column === 0 ? "bold" : "text", size)))));
+    const words = text.split(" ").map((word) => set.width(word, "bold", size));
+    return Math.max(...cells, ...words, 0) + (column === columns.length - 1 ? 0.5 : pad + 0.5);
+  });
 }
 
 function stripBlocks(set: Typesetter, { title, notes, strips }: Strips, width: number): Block[] {
@@ -115,14 +124,13 @@ function figureBlocks(set: Typesetter, { title, notes, items }: Figures, width: 
   ];
 }
 
+/** Sentences are kept together: half a list of warnings reads as the whole of it. */
 function wordBlocks(set: Typesetter, { title, items }: Words, width: number): Block[] {
-  return [
-    headBlock(set, title, [], width),
-    ...items.map((item): Block => {
-      const words = set.paragraph(item, width - 12, { size: 9, after: 3 });
-      return { height: words.height, place: (x, y) => [{ kind: "rule", x: x + 1, y: y + 5.8, width: 5, thickness: 1.4, ink: "ink" }, ...words.place(x + 12, y)] };
-    }),
-  ];
+  const lines = items.map((item): Block => {
+    const words = set.paragraph(item, width - 12, { size: 9, after: 3 });
+    return { height: words.height, place: (x, y) => [{ kind: "rule", x: x + 1, y: y + 5.8, width: 5, thickness: 1.4, ink: "ink" }, ...words.place(x + 12, y)] };
+  });
+  return [headBlock(set, title, [], width), stack(lines)];
 }
 
 function signOffBlocks(set: Typesetter, { title, lines }: SignOff, width: number): Block[] {

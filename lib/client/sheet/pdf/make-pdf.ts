@@ -1,9 +1,9 @@
 import { degrees, PDFDocument, rgb, type Color, type PDFFont, type PDFPage } from "@cantoo/pdf-lib";
 import * as fontkit from "fontkit";
-import { encode } from "uqr";
+import { codeOf } from "../code";
 import { layOut } from "../paper/lay-out";
 import type { Measure, Placed } from "../paper/typesetter";
-import { brandPaths, codePath, hatchPath, isMark, linePath, markPath, samplePoints } from "../paths";
+import { brandPaths, hatchPath, isMark, linePath, markPath, samplePoints } from "../paths";
 import { papers, type Drawing, type FontRole, type LineRole, type MarkShape, type Sheet } from "../sheet";
 
 /** The bytes of the sheet's fonts (public/fonts/sheet-*.ttf): fetched by a browser, read from disk by a server. */
@@ -25,8 +25,6 @@ const styles: Readonly<Record<LineRole, { fill?: Color; stroke?: Color; width?: 
   pull: { fill: ink },
 };
 
-export const codeOptions = { ecc: "L", border: 0 } as const;
-
 /**
  * The sheet as a PDF of selectable text in our own fonts, each cut down to the characters used. No DOM in it: the same runs in a browser and on a server.
  *
@@ -46,7 +44,7 @@ export async function makePdf(sheet: Sheet, fontBytes: SheetFonts, now: Date): P
   document.setCreationDate(now);
   document.setModificationDate(now);
   const { width, height } = papers[sheet.paper];
-  for (const placed of layOut(sheet, measureBy(fonts), (text) => encode(text, codeOptions).size)) {
+  for (const placed of layOut(sheet, measureBy(fonts), (text) => codeOf(text).size)) {
     const page = document.addPage([width, height]);
     for (const item of placed) draw(page, item, fonts, height);
   }
@@ -68,8 +66,8 @@ function draw(page: PDFPage, item: Placed, fonts: Record<FontRole, PDFFont>, hei
   else if (item.kind === "box") page.drawRectangle({ x: item.x, y: y - item.height, width: item.width, height: item.height, borderColor: ink, borderWidth: 1.6 });
   else if (item.kind === "brand") for (const { path, width, dash } of brandPaths) page.drawSvgPath(path, { x: item.x, y, scale: item.size / 30, borderColor: dash === null ? ink : chalk, borderWidth: width, ...(dash === null ? {} : { borderDashArray: [...dash] }) });
   else if (item.kind === "code") {
-    const { data, size } = encode(item.text, codeOptions);
-    page.drawSvgPath(codePath(data), { x: item.x, y, scale: item.size / size, color: ink });
+    const { path, size } = codeOf(item.text);
+    page.drawSvgPath(path, { x: item.x, y, scale: item.size / size, color: ink });
   } else if (item.kind === "sample") {
     const sample = item.sample as LineRole | MarkShape;
     const drawing: Drawing = { width: 18, height: 10, items: [isMark(sample) ? { kind: "mark", shape: sample, at: [9, 5] } : { kind: "line", role: sample, points: samplePoints[sample], closed: samplePoints[sample].length > 2 }] };

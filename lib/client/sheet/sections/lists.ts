@@ -20,7 +20,7 @@ export function takeoffSection({ t, answers }: Context): Table | null {
 export function marksSections({ t, answers, precision, metric }: Context): Section[] {
   if (answers.marks === null) return [];
   const { input, answer } = answers.marks;
-  const spacing = typeof input.spacing === "string" ? shownAs(input.spacing, precision, unitOfInput(input)) : "";
+  const spacing = typeof input.spacing === "string" ? shownAs(input.spacing, precision, unitOfInput(input), "inches") : "";
   const unit = t(`sheet.unit.${metric ? "mm" : "in"}`);
   const figures = (id: string, title: string, notes: readonly string[], lengths: readonly { in: number; exact: string | null }[]): Figures => ({ kind: "figures", id, title, notes, items: lengths.map((mark) => runningFigure(mark, precision)) });
   const clashes = answer.conflicts.map(({ line, joist, bolt, move, toward, hits }) => t(`sheet.marks.${hits}`, { joist: joist + 1, bolt: bolt + 1, move: move.text, toward: t(`sheet.marks.${toward}`), line: t(`sheet.marks.${line}`) }));

@@ -79,7 +79,7 @@ export function boardsSection({ t, answers, precision, width }: Context): Strips
     kind: "strips",
     id: "boards",
     title: t("sheet.boards.title"),
-    notes: [t("sheet.boards.summary", { boards: totals.boards, pieces: totals.pieces, waste: totals.wasteShare }), ...(boardsProved ? [] : [t("sheet.boards.notProved")])],
+    notes: [t("sheet.boards.summary", { boards: totals.boards, pieces: totals.pieces, waste: Math.round(totals.wasteShare * 100) }), ...(boardsProved ? [] : [t("sheet.boards.notProved")])],
     strips: boards.map(({ stock, pieces: cut, offcut }, index) => {
       let from = 0;
       const parts = cut.map((id) => {

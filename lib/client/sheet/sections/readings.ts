@@ -1,5 +1,6 @@
+import { parseLength, printLength, type Length } from "@/calculators/length";
 import type { LengthAnswer } from "@/calculators/schema/measure";
-import { byCorners, shownAs, unitOfInput, withLean, type Context } from "../context";
+import { byCorners, onTape, shownAs, unitOfInput, withLean, type Context } from "../context";
 import type { Table } from "../sheet";
 
 type Shown = string | null;
@@ -9,21 +10,26 @@ export function readingsTable(context: Context): Table | null {
   const { t, answers, precision } = context;
   const { square, footprint, inset, fit, recheck } = answers;
   const rows: { name: string; concrete: Shown; expected: Shown; chalk: Shown }[] = [];
-  const shownReading = (reading: { reading: LengthAnswer | null; measured: LengthAnswer } | null | undefined): Shown => (reading == null ? null : (reading.reading ?? reading.measured).text);
+  const shownReading = (reading: { reading: LengthAnswer | null; measured: LengthAnswer } | null | undefined): Shown => (reading === null || reading === undefined ? null : onTape(reading.reading ?? reading.measured, precision));
   const row = (name: string, concrete: Shown, expected: Shown, chalk: Shown) => {
     if (concrete !== null || expected !== null || chalk !== null) rows.push({ name, concrete, expected, chalk });
   };
-  const fitCheck = (name: string): Shown => fit?.answer.checks.find(({ from, to }) => `${from}${to}`.toLowerCase() === name)?.reading.text ?? null;
+  const fitCheck = (name: string): LengthAnswer | undefined => fit?.answer.checks.find(({ from, to }) => `${from}${to}`.toLowerCase() === name)?.reading;
   if (footprint === null) {
     for (const name of ["ab", "bc", "cd", "da"] as const) row(byCorners(name), shownReading(square?.answer.readings[name]), null, shownReading(recheck?.answer.readings[name]));
     for (const name of ["ac", "bd"] as const) {
-      const measured = inset?.answer.check?.drops?.[name] === undefined ? null : typedChalk(inset.input, name, precision);
-      row(byCorners(name), shownReading(square?.answer.readings[name]), inset?.answer.expected[name].reading.text ?? fitCheck(name), shownReading(recheck?.answer.readings[name]) ?? measured);
+      const expected = inset?.answer.expected[name].reading ?? fitCheck(name);
+      const typed = typedChalk(inset?.input, name);
+      row(byCorners(name), shownReading(square?.answer.readings[name]), expected === undefined ? null : onTape(expected, precision), shownReading(recheck?.answer.readings[name]) ?? (typed === null ? null : printLength(typed, precision, "inches")));
     }
-    row(t("sheet.readings.difference"), square?.answer.difference.text ?? null, null, recheck?.answer.difference.text ?? null);
+    const [ac, bd] = [typedChalk(inset?.input, "ac"), typedChalk(inset?.input, "bd")];
+    row(t("sheet.readings.difference"), square?.answer.difference.text ?? null, null, recheck?.answer.difference.text ?? (ac === null || bd === null ? null : printLength(ac.minus(bd).magnitude(), precision)));
   } else {
-    const known = new Map(fit?.answer.checks.map(({ from, to, reading }) => [`${from}${to}`, reading.text]));
-    for (const { from, to, reading, chalk } of footprint.answer.checks) row(byCorners(`${from}${to}`), reading.text, known.get(`${from}${to}`) ?? chalk?.reading.text ?? null, null);
+    const known = new Map(fit?.answer.checks.map(({ from, to, reading }) => [`${from}${to}`, reading]));
+    for (const { from, to, reading, chalk } of footprint.answer.checks) {
+      const expected = known.get(`${from}${to}`) ?? chalk?.reading;
+      row(byCorners(`${from}${to}`), onTape(reading, precision), expected === undefined ? null : onTape(expected, precision), null);
+    }
   }
   if (rows.length === 0) return null;
   const source = square ?? footprint ?? inset ?? fit ?? recheck;
@@ -39,9 +45,15 @@ export function readingsTable(context: Context): Table | null {
   };
 }
 
-function typedChalk(input: Readonly<Record<string, unknown>>, name: "ac" | "bd", precision: Context["precision"]): Shown {
-  const typed = (input.chalkDiagonals as Record<string, unknown> | undefined)?.[name];
-  return typeof typed === "string" ? shownAs(typed, precision, unitOfInput(input)) : null;
+/** A chalk diagonal typed with the chalk lines, where no recheck says more. */
+function typedChalk(input: Readonly<Record<string, unknown>> | undefined, name: "ac" | "bd"): Length | null {
+  const typed = (input?.chalkDiagonals as Record<string, unknown> | undefined)?.[name];
+  if (input === undefined || typeof typed !== "string") return null;
+  try {
+    return parseLength(typed, unitOfInput(input));
+  } catch {
+    return null;
+  }
 }
 
 /** Where each chalk corner is marked: from the two slab edges that meet there, square to them. */
@@ -52,8 +64,8 @@ export function offsetsTable({ t, answers }: Context): Table | null {
     kind: "table",
     id: "offsets",
     title: t("sheet.offsets.title"),
-    columns: [{ text: t("sheet.offsets.corner"), share: 2.2 }, ...[1, 2].flatMap(() => [{ text: t("sheet.offsets.edge"), share: 2 }, { text: t("sheet.offsets.in"), figure: true, share: 3.4 }])],
-    rows: Object.entries(offsets).map(([corner, bySide]) => [corner, ...Object.entries(bySide).flatMap(([side, length]) => [byCorners(side), withLean(length, t)])]),
+    columns: [{ text: t("sheet.offsets.corner"), share: 1 }, ...[1, 2].map(() => ({ text: t("sheet.offsets.edge"), figure: true, share: 2 }))],
+    rows: Object.entries(offsets).map(([corner, bySide]) => [corner, ...Object.entries(bySide).map(([side, length]) => `${byCorners(side)} ${withLean(length, t)}`)]),
   };
 }
 

@@ -7,7 +7,7 @@ export const dynamic = "force-static";
 export const dynamicParams = false;
 
 export function generateStaticParams() {
-  const names = ["reading", ...calculators.map(({ name }) => name)];
+  const names = ["reading", "sheet", ...calculators.map(({ name }) => name)];
   return locales.flatMap((locale) => names.map((name) => ({ locale, name })));
 }
 
