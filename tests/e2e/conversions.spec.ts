@@ -1,19 +1,11 @@
 import AxeBuilder from "@axe-core/playwright";
 import { expect, test, type Page } from "@playwright/test";
+import { complaints } from "../setup/complaints";
 
 const path = "/calculators/conversions";
 const verdict = (page: Page) => page.locator(".verdict-title");
 const form = (page: Page, name: string) => page.getByRole("row", { name });
 const strip = (...lines: [op: string, value: string][]) => new URLSearchParams(lines.flatMap(([op, value], row) => [[`strip.${row}.op`, op], [`strip.${row}.value`, value]])).toString();
-
-function complaints(page: Page): string[] {
-  const found: string[] = [];
-  page.on("console", (message) => {
-    if (message.type() === "error" || message.type() === "warning") found.push(message.text());
-  });
-  page.on("pageerror", (error) => found.push(error.message));
-  return found;
-}
 
 test("a decimal foot from a plan is told as the tape shows it, with the error of every form @phone", async ({ page }) => {
   const found = complaints(page);

@@ -1,20 +1,12 @@
 import AxeBuilder from "@axe-core/playwright";
 import { expect, test, type Page } from "@playwright/test";
+import { complaints } from "../setup/complaints";
 
 const path = "/calculators/corner";
 const verdict = (page: Page) => page.locator(".verdict-title");
 const body = (page: Page) => page.locator(".verdict-body");
 const field = (page: Page, label: string) => page.getByLabel(label, { exact: true });
 const figure = (page: Page, label: string) => page.locator(".key-values dt", { hasText: label }).first().locator("+ dd");
-
-function complaints(page: Page): string[] {
-  const found: string[] = [];
-  page.on("console", (message) => {
-    if (message.type() === "error" || message.type() === "warning") found.push(message.text());
-  });
-  page.on("pageerror", (error) => found.push(error.message));
-  return found;
-}
 
 test("a carpenter types two legs, and learns what the tape must read and the triangle that fits @phone", async ({ page }) => {
   const found = complaints(page);

@@ -7,16 +7,9 @@ import AxeBuilder from "@axe-core/playwright";
 import { expect, type Page, test } from "@playwright/test";
 import { problemCodes, problems } from "../../api-spec/problems";
 import { codeExamples } from "../../components/developers/code-examples";
+import { complaints } from "../setup/complaints";
 
 const run = promisify(execFile);
-
-/** Everything a page says in the console that is a complaint. */
-function complaints(page: Page): string[] {
-  const heard: string[] = [];
-  page.on("console", (message) => ["error", "warning"].includes(message.type()) && !message.text().includes("blocked by Playwright") && heard.push(message.text()));
-  page.on("pageerror", (error) => heard.push(error.message));
-  return heard;
-}
 
 test("the reference lists every operation, shows its fields, and calls the site it is read on, with a clean console", async ({ page, request }) => {
   const heard = complaints(page);
@@ -119,15 +112,17 @@ test.describe("the running site", () => {
   });
 
   test("counts each address by itself, as its one proxy says, and nobody by what they say of themselves", async ({ request }) => {
-    const rest = async (forwarded: string) => {
-      const response = await request.post("/api/v1/conversions", { ...post('{"value":"7/16"}'), headers: { "content-type": "application/json", "x-forwarded-for": forwarded } });
+    const left = async (forwarded: string, path: string, data: object) => {
+      const response = await request.post(`/api/v1/${path}`, { data, headers: { "x-forwarded-for": forwarded } });
       return Number(/;r=(\d+)/.exec(response.headers()["ratelimit"]!)![1]);
     };
+    const one = { value: "7/16" };
+    const hundred = { items: Array.from({ length: 100 }, () => ({ operation: "conversions", input: one })) };
     const mine = `198.51.100.${Math.floor(Math.random() * 200)}`;
-    const first = await rest(mine);
-    for (let times = 0; times < 30; times += 1) await rest(`1.2.3.${times}, ${mine}`);
-    expect(await rest(mine)).toBeLessThan(first);
-    expect(await rest(`203.0.113.${Math.floor(Math.random() * 200)}`)).toBe(first);
+    const first = await left(mine, "conversions", one);
+    await Promise.all(Array.from({ length: 20 }, (_, index) => left(`1.2.3.${index}, ${mine}`, "batch", hundred)));
+    expect(await left(mine, "conversions", one)).toBeLessThan(first);
+    expect(await left(`203.0.113.${Math.floor(Math.random() * 200)}`, "conversions", one)).toBe(first);
   });
 
   test("serves the document with a tag, and nothing again to whoever has it", async ({ request }) => {

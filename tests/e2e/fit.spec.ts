@@ -1,5 +1,6 @@
 import AxeBuilder from "@axe-core/playwright";
 import { expect, test, type Page } from "@playwright/test";
+import { complaints } from "../setup/complaints";
 
 const path = "/calculators/fit";
 const verdict = (page: Page) => page.locator(".verdict-title");
@@ -7,15 +8,6 @@ const field = (page: Page, label: string) => page.getByLabel(label, { exact: tru
 const reading = (page: Page, label: string) => page.getByRole("textbox", { name: new RegExp(`${label}$`) });
 const row = (page: Page, table: string, name: string) => page.locator(`section[aria-labelledby="${table}-title"]`).getByRole("row", { name: new RegExp(`^${name}`) });
 const long = `${path}?corners.A.x=0&corners.A.y=0&corners.B.x=337&corners.B.y=0&corners.C.x=337&corners.C.y=288&corners.D.x=0&corners.D.y=288&size.length=335&size.width=287&inset=1%2F2+in`;
-
-function complaints(page: Page): string[] {
-  const found: string[] = [];
-  page.on("console", (message) => {
-    if (message.type() === "error" || message.type() === "warning") found.push(message.text());
-  });
-  page.on("pageerror", (error) => found.push(error.message));
-  return found;
-}
 
 test("a racked slab: the plan is turned on it, and each corner gets its two offsets @phone", async ({ page }) => {
   const found = complaints(page);

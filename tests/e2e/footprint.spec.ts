@@ -1,20 +1,12 @@
 import AxeBuilder from "@axe-core/playwright";
 import { expect, test, type Page } from "@playwright/test";
+import { complaints } from "../setup/complaints";
 
 const path = "/calculators/footprint";
 const verdict = (page: Page) => page.locator(".verdict-title");
 const field = (page: Page, label: string) => page.getByLabel(label, { exact: true });
 const row = (page: Page, table: string, name: string) => page.locator(`section[aria-labelledby="${table}-title"]`).getByRole("row", { name: new RegExp(`^${name}`) });
 const walk = (text: string) => `${path}?by=walk&walk=${encodeURIComponent(text)}`;
-
-function complaints(page: Page): string[] {
-  const found: string[] = [];
-  page.on("console", (message) => {
-    if (message.type() === "error" || message.type() === "warning") found.push(message.text());
-  });
-  page.on("pageerror", (error) => found.push(error.message));
-  return found;
-}
 
 test("an L walked run by run closes, and its chalk lines and check pulls follow @phone", async ({ page }) => {
   const found = complaints(page);

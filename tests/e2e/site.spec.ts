@@ -1,18 +1,9 @@
 import AxeBuilder from "@axe-core/playwright";
 import { expect, test, type Page } from "@playwright/test";
+import { complaints } from "../setup/complaints";
 
 const paths = ["/", "/calculators", "/privacy", "/terms", "/accessibility", "/contact"];
 const addresses = paths.flatMap((path) => [path, path === "/" ? "/es" : `/es${path}`]);
-
-/** What the browser complained of while a page was open. */
-function complaints(page: Page): string[] {
-  const found: string[] = [];
-  page.on("console", (message) => {
-    if (message.type() === "error" || message.type() === "warning") found.push(message.text());
-  });
-  page.on("pageerror", (error) => found.push(error.message));
-  return found;
-}
 
 /** On a phone the language and the display are behind the menu. */
 async function openMenu(page: Page): Promise<void> {

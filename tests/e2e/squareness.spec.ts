@@ -1,5 +1,6 @@
 import AxeBuilder from "@axe-core/playwright";
 import { expect, test, type Page } from "@playwright/test";
+import { complaints } from "../setup/complaints";
 
 const path = "/calculators/squareness";
 const verdict = (page: Page) => page.locator(".verdict-title");
@@ -9,15 +10,6 @@ const reading = (page: Page, label: string) => page.getByRole("textbox", { name:
 const figure = (page: Page, label: string) => page.locator(".key-values dt", { hasText: label }).first().locator("+ dd");
 const racked = "length=28%27&width=22%27&burn=1+in&diagonals.ac=428+9/16&diagonals.bd=428+1/16&tolerance=practice-3-16";
 const missedBurn = "sides.ab=481&sides.bc=361&sides.cd=481&sides.da=361&diagonals.ac=600&diagonals.bd=601&burn=1+in"; // Q07, AC read without its burn
-
-function complaints(page: Page): string[] {
-  const found: string[] = [];
-  page.on("console", (message) => {
-    if (message.type() === "error" || message.type() === "warning") found.push(message.text());
-  });
-  page.on("pageerror", (error) => found.push(error.message));
-  return found;
-}
 
 test("a carpenter types two sides and both burned diagonals, and learns which side to move and what the tape must then read @phone", async ({ page }) => {
   const found = complaints(page);
