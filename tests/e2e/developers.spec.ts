@@ -4,7 +4,7 @@ import os from "node:os";
 import path from "node:path";
 import { promisify } from "node:util";
 import AxeBuilder from "@axe-core/playwright";
-import { expect, type Page, test } from "@playwright/test";
+import { expect, test } from "@playwright/test";
 import { problemCodes, problems } from "../../api-spec/problems";
 import { codeExamples } from "../../components/developers/code-examples";
 import { complaints } from "../setup/complaints";
