@@ -20,19 +20,7 @@ export function goTo(address: string): void {
   document.getElementById("main")?.focus({ preventScroll: true });
 }
 
-let chosenBy: string | null = null;
-
-/** The same by a choice on the page: the focus goes back to the choice, so that arrow keys can go on. */
-export function goByChoice(address: string, name: string): void {
-  chosenBy = name;
+/** The same by a choice on the page, which keeps the focus, so that arrow keys can go on. */
+export function goByChoice(address: string): void {
   window.history.pushState(null, "", address);
-}
-
-/** Gives the choice its focus back, once the place it led to is drawn. */
-export function refocusChoice(): void {
-  if (chosenBy === null) return;
-  const choice = document.querySelector<HTMLInputElement>(`input[name="${chosenBy}"]:checked`);
-  if (choice === null) return;
-  choice.focus({ preventScroll: true });
-  chosenBy = null;
 }

@@ -8,10 +8,10 @@ type StageCalculator = ComponentType<{ header: ReactNode }>;
 export const stageCalculators: Readonly<Record<string, () => Promise<StageCalculator>>> = {
   squareness: () => import("@/components/calculators/squareness/squareness-calculator").then((module) => module.SquarenessCalculator),
   footprint: () => import("@/components/calculators/footprint/footprint-calculator").then((module) => module.FootprintCalculator),
+  level: () => import("@/components/calculators/level/level-calculator").then((module) => module.LevelCalculator),
   inset: () => import("@/components/calculators/inset/inset-calculator").then((module) => module.InsetCalculator),
   fit: () => import("@/components/calculators/fit/fit-calculator").then((module) => module.FitCalculator),
   anchors: () => import("@/components/calculators/anchors/anchors-calculator").then((module) => module.AnchorsCalculator),
-  level: () => import("@/components/calculators/level/level-calculator").then((module) => module.LevelCalculator),
   plates: () => import("@/components/calculators/plates/plates-calculator").then((module) => module.PlatesCalculator),
   takeoff: () => import("@/components/calculators/takeoff/takeoff-calculator").then((module) => module.TakeoffCalculator),
   marks: () => import("@/components/calculators/marks/marks-calculator").then((module) => module.MarksCalculator),

@@ -12,7 +12,6 @@ import type { SillSet } from "@/lib/client/set/schema";
 import { keepReport, stageFormStore } from "@/lib/client/set/stage-form";
 import type { Slot, Stage } from "@/lib/client/set/stages";
 import { setStore } from "@/lib/client/set/use-sets";
-import { refocusChoice } from "./set-link";
 import { stageCalculators } from "./stage-calculators";
 
 interface StagePanelProps {
@@ -21,7 +20,6 @@ interface StagePanelProps {
   slot: Slot;
   /** The calculator's version. */
   core: string;
-  header: ReactNode;
   next: ReactNode;
 }
 
@@ -32,7 +30,7 @@ interface Loaded {
 }
 
 /** One calculation of a set: the calculator's own page in use, its form kept by the set. */
-export function StagePanel({ set, stages, slot, core, header, next }: StagePanelProps) {
+export function StagePanel({ set, stages, slot, core, next }: StagePanelProps) {
   const t = useTranslate();
   const [tries, setTries] = useState(0);
   const [loaded, setLoaded] = useState<Loaded | "failed" | null>(null);
@@ -50,24 +48,22 @@ export function StagePanel({ set, stages, slot, core, header, next }: StagePanel
     };
   }, [locale, calculator, tries]);
   useTakeQuietly(set, stages, slot);
-  useEffect(refocusChoice, [slot.id, loaded]);
 
   const home = useStageHome(set.id, slot, core, next);
   if (loaded === "failed") {
     return (
       <div className="set-part">
-        {header}
         <p role="alert">{t("set.stages.failed")}</p>
         <Button onClick={() => setTries(tries + 1)}>{t("set.stages.again")}</Button>
       </div>
     );
   }
   // A calculator must never meet another's form.
-  if (loaded === null || loaded.of !== calculator) return <div className="set-part">{header}</div>;
+  if (loaded === null || loaded.of !== calculator) return null;
   return (
     <MessagesProvider locale={locale} messages={loaded.messages}>
       <FormHomeContext value={home}>
-        <loaded.Calculator key={slot.id} header={header} />
+        <loaded.Calculator key={slot.id} header={null} />
       </FormHomeContext>
     </MessagesProvider>
   );
@@ -82,17 +78,21 @@ function useTakeQuietly(set: SillSet, stages: readonly Stage[], slot: Slot): voi
   }, [set, stages, slot]);
 }
 
-function useStageHome(setId: string, slot: Slot, core: string, next: ReactNode): FormHome {
-  const { id, stage, calculator, wall } = slot;
-  const bound = useMemo(() => {
-    const place: Slot = { id, stage, calculator, ...(wall === undefined ? {} : { wall }) };
-    const adapter = adapterOf(calculator);
-    return {
-      open: (start: Parameters<FormHome["open"]>[0]) => stageFormStore(setStore(), setId, id, start),
-      report: (report: Parameters<FormHome["report"]>[0]) => {
-        if (adapter !== undefined) keepReport({ store: setStore(), setId, slot: place, adapter, core }, report);
-      },
-    };
-  }, [setId, id, stage, calculator, wall, core]);
+function useStageHome(setId: string, { id, stage, calculator, wall }: Slot, core: string, next: ReactNode): FormHome {
+  const bound = useMemo(() => bindStage(setId, { id, stage, calculator, ...(wall === undefined ? {} : { wall }) }, core), [setId, id, stage, calculator, wall, core]);
   return useMemo(() => ({ ...bound, next }), [bound, next]);
+}
+
+function bindStage(setId: string, slot: Slot, core: string): Omit<FormHome, "next"> {
+  const adapter = adapterOf(slot.calculator);
+  let told: unknown = null;
+  return {
+    open: (start) => stageFormStore(setStore(), setId, slot.id, start),
+    report(report) {
+      // A search that ends by time may answer otherwise in another tab: each tab tells an answer once, so that they do not take turns.
+      if (report.answer !== null && report.answer === told) return;
+      told = report.answer;
+      if (adapter !== undefined) keepReport({ store: setStore(), setId, slot, adapter, core }, report);
+    },
+  };
 }

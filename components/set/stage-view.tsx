@@ -49,37 +49,39 @@ export function StageView({ set, stages, states, state, part, versions }: StageV
 
   const choose = (calculator: string) => {
     if (stage.main.includes(calculator) && calculator !== chosenFor(set, stage)) setStore().change(set.id, { choices: { [stage.name]: calculator } }, { what: "choice" });
-    goByChoice(setAddress(t.locale, { set: set.id, stage: stage.name, part: stage.beside.includes(calculator) ? calculator : null }), "set-choice");
+    goByChoice(setAddress(t.locale, { set: set.id, stage: stage.name, part: stage.beside.includes(calculator) ? calculator : null }));
   };
   const offered = [...stage.main, ...stage.beside];
   const walls = slots.flatMap((known) => (known.slot.wall === undefined ? [] : [known.slot.wall]));
-  const header = (
+  return (
     <>
-      <p className="set-place">
-        <SetLink href={setAddress(t.locale, { set: set.id })}>{t("set.stages.all")}</SetLink>
-        <span>{t("set.stages.of", { place: index + 1, of: states.length })}</span>
-      </p>
-      <h2>{t(`set.stages.${stage.name}`)}</h2>
-      {offered.length < 2 ? null : (
-        <div className="field">
-          <Segmented name="set-choice" legend={t("set.stages.choice")} value={slot.calculator} onChange={choose} options={offered.map((name) => ({ value: name, label: t(`common.calculators.${name}`) }))} />
-        </div>
-      )}
-      {walls.length < 2 ? null : (
-        <div className="field">
-          <Segmented
-            name="set-wall"
-            legend={t("set.stages.walls")}
-            value={slot.wall ?? ""}
-            onChange={(wall) => goByChoice(setAddress(t.locale, { set: set.id, stage: stage.name, part: wall }), "set-wall")}
-            options={walls.map((wall) => ({ value: wall, label: wall.toUpperCase() }))}
-          />
-        </div>
-      )}
-      <StaleNote set={set} stages={stages} state={shown} ground={ground} />
+      <div className="set-stage-head">
+        <p className="set-place">
+          <SetLink href={setAddress(t.locale, { set: set.id })}>{t("set.stages.all")}</SetLink>
+          <span>{t("set.stages.of", { place: index + 1, of: states.length })}</span>
+        </p>
+        <h2>{t(`set.stages.${stage.name}`)}</h2>
+        {offered.length < 2 ? null : (
+          <div className="field">
+            <Segmented name="set-choice" legend={t("set.stages.choice")} value={slot.calculator} onChange={choose} options={offered.map((name) => ({ value: name, label: t(`common.calculators.${name}`) }))} />
+          </div>
+        )}
+        {walls.length < 2 ? null : (
+          <div className="field">
+            <Segmented
+              name="set-wall"
+              legend={t("set.stages.walls")}
+              value={slot.wall ?? ""}
+              onChange={(wall) => goByChoice(setAddress(t.locale, { set: set.id, stage: stage.name, part: wall }))}
+              options={walls.map((wall) => ({ value: wall, label: wall.toUpperCase() }))}
+            />
+          </div>
+        )}
+        <StaleNote set={set} stages={stages} state={shown} ground={ground} />
+      </div>
+      <StagePanel set={set} stages={stages} slot={slot} core={versions[slot.calculator] ?? ""} next={next} />
     </>
   );
-  return <StagePanel set={set} stages={stages} slot={slot} core={versions[slot.calculator] ?? ""} header={header} next={next} />;
 }
 
 /** How a calculation within its stage is named in the address. */

@@ -40,7 +40,7 @@ export function applyPatch(set: SillSet, patch: SetPatch, now: string): SillSet 
   for (const [id, change] of Object.entries(patch.calculations ?? {})) {
     const { fields, ...rest } = change;
     const before = calculations.get(id) ?? blank;
-    const after: Calculation = { ...before, ...rest, fields: withEntries(before.fields, fields) };
+    const after: Calculation = { ...before, ...rest, fields: fields === undefined ? before.fields : withEntries(before.fields, fields) };
     if (isBlank(after)) calculations.delete(id);
     else calculations.set(id, after);
   }

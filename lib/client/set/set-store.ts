@@ -168,7 +168,9 @@ function sharing(older: SillSet | undefined, newer: SillSet): SillSet {
   if (older === undefined) return newer;
   const calculations = Object.entries(newer.calculations).map(([id, calculation]) => {
     const known = older.calculations[id];
-    return [id, known !== undefined && JSON.stringify(known) === JSON.stringify(calculation) ? known : calculation] as const;
+    if (known === undefined) return [id, calculation] as const;
+    if (JSON.stringify(known) === JSON.stringify(calculation)) return [id, known] as const;
+    return [id, JSON.stringify(known.fields) === JSON.stringify(calculation.fields) ? { ...calculation, fields: known.fields } : calculation] as const;
   });
   return { ...newer, calculations: Object.fromEntries(calculations) };
 }

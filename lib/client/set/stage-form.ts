@@ -9,15 +9,14 @@ import type { SetStore } from "./set-store";
 import { fingerprint } from "./stage-state";
 import type { Slot } from "./stages";
 
-/** A form's state of a stored calculation, the same object for the same record, so that React sees no change where there is none. */
-const forms = new WeakMap<Calculation, FormState>();
+/** A form's state of a stored calculation, the same object while what was typed is the same, so that nothing is worked out twice. */
+const forms = new WeakMap<Calculation["fields"], FormState>();
 
-function formOf(calculation: Calculation): FormState {
-  const known = forms.get(calculation);
-  if (known !== undefined) return known;
-  const { fields, unit, precision } = calculation;
+function formOf({ fields, unit, precision }: Calculation): FormState {
+  const known = forms.get(fields);
+  if (known !== undefined && known.unit === unit && known.precision === precision) return known;
   const form = { fields, unit, precision };
-  forms.set(calculation, form);
+  forms.set(fields, form);
   return form;
 }
 
