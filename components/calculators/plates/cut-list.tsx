@@ -41,7 +41,7 @@ export function CutList({ answer }: { answer: PlatesAnswer }) {
 
 function BoardDrawing({ answer, board, perInch }: { answer: PlatesAnswer; board: PlatesAnswer["boards"][number]; perInch: number }) {
   const id = useId();
-  let at = 0;
+  const lengths = board.pieces.map((piece) => answer.pieces.find((candidate) => candidate.id === piece)!.length.in);
   return (
     <svg viewBox={`0 0 ${box} ${height}`} className="plan" aria-hidden="true" focusable="false">
       <defs>
@@ -50,11 +50,9 @@ function BoardDrawing({ answer, board, perInch }: { answer: PlatesAnswer; board:
         </pattern>
       </defs>
       <rect x="1" y="1" width={pixel(board.stock.in * perInch - 2)} height={height - 2} fill={`url(#${id})`} stroke="var(--edge)" strokeWidth="1.5" />
-      {board.pieces.map((piece) => {
-        const { length } = answer.pieces.find((candidate) => candidate.id === piece)!;
-        const x = pixel(at * perInch);
-        const width = pixel(length.in * perInch);
-        at += length.in;
+      {board.pieces.map((piece, index) => {
+        const x = pixel(lengths.slice(0, index).reduce((sum, length) => sum + length, 0) * perInch);
+        const width = pixel(lengths[index]! * perInch);
         return (
           <g key={piece}>
             <rect x={x + 1} y="1" width={Math.max(1, width - 2)} height={height - 2} fill="var(--timber)" stroke="var(--timber-edge)" strokeWidth="2" />

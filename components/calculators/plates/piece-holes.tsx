@@ -2,6 +2,7 @@
 
 import { useState } from "react";
 import type { PlatesAnswer } from "@/calculators/plates";
+import { Button } from "@/components/ui/button";
 import { LengthText } from "@/components/ui/length-text";
 import { useTranslate } from "@/lib/client/i18n/messages-context";
 
@@ -47,9 +48,9 @@ export function PieceHoles({ answer }: { answer: PlatesAnswer }) {
         </table>
       </div>
       {pieces.length < answer.pieces.length ? (
-        <button type="button" className="btn btn-ghost no-print" onClick={() => setAll(true)}>
+        <Button kind="ghost" className="no-print" onClick={() => setAll(true)}>
           {t("plates.holes.more", { count: answer.pieces.length - pieces.length })}
-        </button>
+        </Button>
       ) : null}
     </section>
   );

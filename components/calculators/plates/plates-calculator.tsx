@@ -12,7 +12,7 @@ import { defaults, isLengthField } from "./plates-fields";
 import { PlatesInputs } from "./plates-inputs";
 import { PlatesResults } from "./plates-results";
 import { PlanProgress, PlatesVerdict } from "./plates-verdict";
-import { takeoffFields } from "./takeoff-fields";
+import { takeoffFromPlates } from "./takeoff-fields";
 
 /** Joints, boards and holes, worked out beside the page so that it never waits. */
 export function PlatesCalculator({ header, initial }: { header: ReactNode; initial?: Initial<PlatesAnswer> }) {
@@ -43,5 +43,5 @@ export function PlatesCalculator({ header, initial }: { header: ReactNode; initi
 }
 
 function carriesOf(answer: PlatesAnswer, t: ReturnType<typeof useTranslate>): Carry[] {
-  return [{ href: calculatorAddress(t.locale, "takeoff", takeoffFields(answer)), label: t("plates.carry.takeoff") }];
+  return [{ href: calculatorAddress(t.locale, "takeoff", takeoffFromPlates(answer)), label: t("plates.carry.takeoff") }];
 }
