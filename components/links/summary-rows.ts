@@ -16,6 +16,10 @@ const headlines: Readonly<Record<string, readonly string[]>> = {
   insets: ["lines.ab", "lines.bc", "lines.cd", "lines.da", "diagonal", "reading", "drop", "drops.ac", "drops.bd"],
   footprints: ["closure.distance", "closure.oneIn", "areaSquareFeet", "areaSquareMetres", "perimeter", "lines[].length", "checks[].reading"],
   fits: ["worst", "fits", "overhang", "lines.ab", "lines.bc", "lines.cd", "lines.da", "checks[].reading"],
+  levels: ["verdict", "spread", "high.wall", "high.station", "low.wall", "low.station", "shims[].shim", "misclosure"],
+  plates: ["ok", "totals.boards", "totals.boardLength", "totals.pieces", "boards[].stock", "addedAnchors[].station", "cost", "anchorsProved", "boardsProved"],
+  takeoffs: ["totals.boards", "totals.boardLength", "totals.boardFeet", "totals.pounds"],
+  marks: ["marks", "lastBay", "bays"],
   "anchors/layout": ["bolts", "pieces[].count", "pieces[].spacing", "pieces[].stations"],
   "anchors/check": ["ok", "findings[].code", "additions[].station"],
   conversions: ["total", "feetInches", "inches", "decimalFeet", "millimetres", "metres", "spacing.each"],
@@ -24,8 +28,14 @@ const headlines: Readonly<Record<string, readonly string[]>> = {
 /** Without a list of its own an answer is shown by its first lengths and words. */
 const mostUnlisted = 16;
 
+/** Inputs that are a whole answer of another calculator: told in one line. */
+export const handedOn: ReadonlySet<string> = new Set(["plates", "newAnchors"]);
+
 export function inputRows(input: object, t: Translate): SummaryRow[] {
-  return [...queryFromInput(input)].map(([path, value]) => ({ path, label: labelOf(path, t), text: wordOf(value, t) }));
+  return Object.entries(input).flatMap(([name, value]): SummaryRow[] => {
+    if (handedOn.has(name)) return [{ path: name, label: labelOf(name, t), text: t("links.handedOn") }];
+    return [...queryFromInput({ [name]: value })].map(([path, text]) => ({ path, label: labelOf(path, t), text: wordOf(text, t) }));
+  });
 }
 
 export function answerRows(operation: string, answer: Record<string, unknown>, t: Translate): SummaryRow[] {

@@ -1,7 +1,7 @@
 import { describe, expect, test } from "vitest";
 import { z } from "zod";
 import { operations } from "@/calculators";
-import { answerRows, inputRows, stepWord } from "@/components/links/summary-rows";
+import { answerRows, handedOn, inputRows, stepWord } from "@/components/links/summary-rows";
 import { getTranslate } from "@/lib/client/i18n/load-messages";
 
 const en = getTranslate("en", ["common", "links", "anchors"]);
@@ -16,6 +16,7 @@ function fieldNames(schema: Json | undefined, definitions: Record<string, Json>,
   for (const way of [...(schema.anyOf ?? []), ...(schema.allOf ?? [])]) fieldNames(way, definitions, names);
   for (const [name, field] of Object.entries(schema.properties ?? {})) {
     names.add(name);
+    if (handedOn.has(name)) continue;
     fieldNames(field, definitions, names);
   }
   return fieldNames(schema.items, definitions, names);

@@ -13,7 +13,7 @@ export interface BucketShape {
  */
 export function bucketFor(perMinute: number): BucketShape {
   if (perMinute <= 600) return { capacity: perMinute, refill: 1, interval: Math.ceil(60_000 / perMinute) };
-  return { capacity: perMinute, refill: Math.floor(perMinute / 600), interval: 100 };
+  return { capacity: perMinute, refill: Math.floor(perMinute / 60), interval: 1_000 };
 }
 
 /** Milliseconds from a bucket's last refill until it holds `wanted`, given what it held then. */
