@@ -28,14 +28,17 @@ const headlines: Readonly<Record<string, readonly string[]>> = {
 /** Without a list of its own an answer is shown by its first lengths and words. */
 const mostUnlisted = 16;
 
-/** Inputs that are a whole answer of another calculator: told in one line. */
-export const handedOn: ReadonlySet<string> = new Set(["plates", "newAnchors"]);
-
 export function inputRows(input: object, t: Translate): SummaryRow[] {
   return Object.entries(input).flatMap(([name, value]): SummaryRow[] => {
-    if (handedOn.has(name)) return [{ path: name, label: labelOf(name, t), text: t("links.handedOn") }];
+    if (holdsAnswers(value)) return t.has(`links.words.${name}`) ? [{ path: name, label: labelOf(name, t), text: t("links.handedOn") }] : [];
     return [...queryFromInput({ [name]: value })].map(([path, text]) => ({ path, label: labelOf(path, t), text: wordOf(text, t) }));
   });
+}
+
+/** Whether this part of an input was another calculator's answer: people type lengths, and only answers have them in every form. */
+function holdsAnswers(value: unknown): boolean {
+  if (value === null || typeof value !== "object") return false;
+  return isPrinted(value) || Object.values(value).some(holdsAnswers);
 }
 
 export function answerRows(operation: string, answer: Record<string, unknown>, t: Translate): SummaryRow[] {

@@ -1,7 +1,7 @@
 import { describe, expect, test } from "vitest";
 import { z } from "zod";
 import { operations } from "@/calculators";
-import { answerRows, handedOn, inputRows, stepWord } from "@/components/links/summary-rows";
+import { answerRows, inputRows, stepWord } from "@/components/links/summary-rows";
 import { getTranslate } from "@/lib/client/i18n/load-messages";
 
 const en = getTranslate("en", ["common", "links", "anchors"]);
@@ -11,12 +11,11 @@ type Json = { $ref?: string; anyOf?: Json[]; allOf?: Json[]; properties?: Record
 
 /** Every name a field of these inputs can have. */
 function fieldNames(schema: Json | undefined, definitions: Record<string, Json>, names = new Set<string>()): Set<string> {
-  if (schema === undefined) return names;
+  if (schema === undefined || (schema.properties !== undefined && JSON.stringify(schema).includes("#/definitions/Length\""))) return names; // another calculator's answer, told in one line
   if (schema.$ref) return fieldNames(definitions[schema.$ref.split("/").at(-1)!], definitions, names);
   for (const way of [...(schema.anyOf ?? []), ...(schema.allOf ?? [])]) fieldNames(way, definitions, names);
   for (const [name, field] of Object.entries(schema.properties ?? {})) {
     names.add(name);
-    if (handedOn.has(name)) continue;
     fieldNames(field, definitions, names);
   }
   return fieldNames(schema.items, definitions, names);
