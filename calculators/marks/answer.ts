@@ -25,6 +25,7 @@ export const marksAnswer = z
     lastClear: lengthAnswer.meta({ description: "Clear space in that bay" }),
     lastBayOver: z.boolean().meta({ description: "The last two stand further apart on centre than the spacing" }),
     conflicts: z.array(conflict),
+    bolts: z.array(z.strictObject({ line: z.enum(["here", "opposite"]), station: lengthAnswer, washer: lengthAnswer })).meta({ description: "The bolts as asked, with the washer each was taken to have" }),
     joists: z.array(joist).meta({ description: "All of them, with those at both ends" }),
     opposite: z.array(lengthAnswer).nullable().meta({ description: "Marks on the opposite wall when joists lap" }),
     oppositeJoists: z.array(joist).nullable(),

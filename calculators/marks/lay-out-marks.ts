@@ -47,6 +47,10 @@ export function layOutMarks(input: MarksInput): MarksAnswer {
       ...told(findConflicts(joists, bolts(input.bolts), thickness, clearance), "here"),
       ...(opposite === null ? [] : told(findConflicts(opposite, bolts(input.oppositeBolts), thickness, clearance), "opposite")),
     ],
+    bolts: [
+      ...bolts(input.bolts).map(({ station, washer }) => ({ line: "here" as const, station: show(station), washer: show(washer) })),
+      ...(opposite === null ? [] : bolts(input.oppositeBolts).map(({ station, washer }) => ({ line: "opposite" as const, station: show(station), washer: show(washer) }))),
+    ],
     joists: joists.map(shown),
     opposite: opposite === null ? null : opposite.slice(1, -1).map(({ mark }) => show(mark)),
     oppositeJoists: opposite === null ? null : opposite.map(shown),

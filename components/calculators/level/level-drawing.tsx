@@ -9,6 +9,7 @@ const box = 390;
 const margin = 26;
 const top = 54;
 const depth = 84;
+const steps = [1, 2, 5, 10, 20, 50, 100, 200, 500, 1000, 2000] as const;
 /** A fresh page shows a top that dips, without figures. */
 const blank = [0, -3, -8, -4, -1].map((height, index) => ({ along: index, height }));
 
@@ -20,8 +21,9 @@ export function LevelDrawing({ answer }: { answer: LevelAnswer | null }) {
   const length = Math.max(...points.map(({ along }) => along), 1e-9);
   const spread = Math.max(...points.map(({ height }) => -height), 0);
   const perInch = (box - 2 * margin) / length;
-  const heightPerInch = spread === 0 ? 0 : depth / spread;
-  const times = answer === null || spread === 0 ? 1 : Math.max(1, Math.round(heightPerInch / perInch));
+  // A round number of times larger, which the caption can state.
+  const times = answer === null || spread === 0 ? 1 : (steps.findLast((step) => step * spread * perInch <= depth) ?? 1);
+  const heightPerInch = spread === 0 ? 0 : answer === null ? depth / spread : Math.min(depth / spread, times * perInch);
   const placed = points.map(({ along, height }) => ({ x: pixel(margin + along * perInch), y: pixel(top - height * heightPerInch) }));
   const outline = placed.map(({ x, y }) => `${x} ${y}`).join("L");
   const bottom = top + depth + 34;
@@ -51,7 +53,7 @@ function Shim({ answer, index, x, y, bottom, crowded }: { answer: LevelAnswer; i
       {y - top > 3 ? <path d={`M${x} ${top}V${y}`} fill="none" stroke={isLow ? "var(--keel)" : "var(--steel)"} strokeWidth="2.2" /> : null}
       <circle cx={x} cy={y} r="4" fill={isLow ? "var(--keel)" : "var(--steel)"} />
       {isTold ? (
-        <text x={anchor === "start" ? x - 16 : anchor === "end" ? x + 16 : x} y={isLow || index % 2 === 0 ? top - 12 : top - 30} textAnchor={anchor} className={isLow ? "num small halo out" : "num small halo"}>
+        <text x={anchor === "start" ? x - 16 : anchor === "end" ? x + 16 : x} y={isLow || index % 2 === 0 || answer.points.length < 6 ? top - 12 : top - 30} textAnchor={anchor} className={isLow ? "num small halo out" : "num small halo"}>
           {index === answer.high.index ? '0"' : shim.text}
         </text>
       ) : null}

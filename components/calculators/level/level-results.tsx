@@ -74,8 +74,8 @@ function ShimTable({ answer }: { answer: LevelAnswer }) {
             <tr>
               <th scope="col">{t("level.table.number")}</th>
               <th scope="col">{t("level.table.place")}</th>
-              <th scope="col">{t("level.table.elevation")}</th>
-              <th scope="col">{t("level.table.shim")}</th>
+              <th scope="col" className="figure">{t("level.table.elevation")}</th>
+              <th scope="col" className="figure">{t("level.table.shim")}</th>
             </tr>
           </thead>
           <tbody>
@@ -137,8 +137,8 @@ function FallTable({ answer }: { answer: LevelAnswer }) {
           <tr>
             <th scope="col">{t("level.falls.from")}</th>
             <th scope="col">{t("level.falls.to")}</th>
-            <th scope="col">{t("level.falls.fall")}</th>
-            <th scope="col">{t("level.falls.oneIn")}</th>
+            <th scope="col" className="figure">{t("level.falls.fall")}</th>
+            <th scope="col" className="figure">{t("level.falls.oneIn")}</th>
           </tr>
         </thead>
         <tbody>

@@ -64,16 +64,19 @@ function MarkTable({ answer }: { answer: MarksAnswer }) {
           <thead>
             <tr>
               <th scope="col">{t("marks.table.number")}</th>
-              <th scope="col">{t(oppositeJoists === null ? "marks.table.mark" : "marks.table.here")}</th>
-              {oppositeJoists === null ? null : <th scope="col">{t("marks.table.opposite")}</th>}
+              <th scope="col" className="figure">{t(oppositeJoists === null ? "marks.table.mark" : "marks.table.here")}</th>
+              {oppositeJoists === null ? null : <th scope="col" className="figure">{t("marks.table.opposite")}</th>}
               <th scope="col">{t("marks.table.kind")}</th>
             </tr>
           </thead>
           <tbody>
             {Array.from({ length: rows }, (_, index) => {
-              const [here, there] = [joists[index], oppositeJoists?.[index]];
+              // Both lines end flush: their last joists share the last row, whichever line has more before it.
+              const placeIn = (count: number) => (index === rows - 1 ? count - 1 : index < count - 1 ? index : -1);
+              const [at, across] = [placeIn(joists.length), placeIn(oppositeJoists?.length ?? 0)];
+              const [here, there] = [joists[at], oppositeJoists?.[across]];
               const kind = here?.kind ?? there!.kind;
-              const isHit = hit("here", index) || hit("opposite", index);
+              const isHit = hit("here", at) || hit("opposite", across);
               return (
                 <tr key={index}>
                   <th scope="row">{index === 0 || index === rows - 1 ? t("marks.table.end") : index}</th>

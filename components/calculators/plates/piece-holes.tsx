@@ -24,8 +24,8 @@ export function PieceHoles({ answer }: { answer: PlatesAnswer }) {
           <thead>
             <tr>
               <th scope="col">{t("plates.holes.piece")}</th>
-              <th scope="col">{t("plates.holes.running")}</th>
-              <th scope="col">{t("plates.holes.across")}</th>
+              <th scope="col" className="figure">{t("plates.holes.running")}</th>
+              <th scope="col" className="figure">{t("plates.holes.across")}</th>
               <th scope="col">{t("plates.holes.kind")}</th>
             </tr>
           </thead>

@@ -32,10 +32,10 @@ export function PlatesCalculator({ header, initial }: { header: ReactNode; initi
       fields={<PlatesInputs form={form} />}
       verdict={<PlatesVerdict answer={shown} busy={plan.busy} />}
       results={
-        <div aria-busy={plan.busy}>
+        <>
           {plan.busy ? <PlanProgress plan={plan} stop={form.answer === null ? null : planner.stop} /> : null}
           {shown === null ? null : <PlatesResults answer={shown} />}
-        </div>
+        </>
       }
       carries={form.answer === null ? [] : carriesOf(form.answer, t)}
     />

@@ -67,9 +67,9 @@ function AnchorTable({ answer }: Part) {
           <thead>
             <tr>
               <th scope="col">{t("plates.added.piece")}</th>
-              <th scope="col">{t("plates.added.station")}</th>
-              <th scope="col">{t("plates.added.running")}</th>
-              <th scope="col">{t("plates.added.window")}</th>
+              <th scope="col" className="figure">{t("plates.added.station")}</th>
+              <th scope="col" className="figure">{t("plates.added.running")}</th>
+              <th scope="col" className="figure">{t("plates.added.window")}</th>
             </tr>
           </thead>
           <tbody>
@@ -104,8 +104,8 @@ function JointTable({ answer }: Part) {
           <thead>
             <tr>
               <th scope="col">{t("plates.joints.between")}</th>
-              <th scope="col">{t("plates.joints.at")}</th>
-              <th scope="col">{t("plates.joints.window")}</th>
+              <th scope="col" className="figure">{t("plates.joints.at")}</th>
+              <th scope="col" className="figure">{t("plates.joints.window")}</th>
             </tr>
           </thead>
           <tbody>

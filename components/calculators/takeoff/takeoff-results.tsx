@@ -59,7 +59,7 @@ function ListTable({ answer, isMetric }: { answer: TakeoffAnswer; isMetric: bool
         <table className="data-table takeoff-list">
           <thead>
             <tr>
-              <th scope="col">{t("takeoff.table.quantity")}</th>
+              <th scope="col" className="figure">{t("takeoff.table.quantity")}</th>
               <th scope="col">{t("takeoff.table.item")}</th>
               <th scope="col">{t("takeoff.table.note")}</th>
             </tr>
