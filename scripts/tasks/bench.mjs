@@ -58,5 +58,6 @@ await lifecycle(async (keep) => {
   // So many a minute that every call passes: what is measured is the asking, not the refusing.
   await withSite(1_000_000, (site) => measure("Requests, limiter on", () => requestsOverEcho(site, examples, "limiter on")));
   await measure("The parser", () => fromTypescript("parser.ts"));
+  await measure("Plates", () => fromTypescript("plates.ts"));
   printTable(rows);
 });
