@@ -53,7 +53,7 @@ export const platesInput = calculatorInput({
   clearOfBolts: checkFields.clearOfBolts,
   bit: lengthField({ description: "Size of the bit for the holes; 1/16 in over the bolt when left out", example: "9/16" }).optional(),
   inset: lengthField({ sign: "any", description: "From slab edge to chalk line: needed for bolts measured from the slab", example: "7/16" }).optional(),
-  timeLimit: numberField({ minimum: 0.05, maximum: 60, description: "Seconds to look for a better plan, 0.7 when left out; the API stops after 1", example: 0.7 }).optional(),
+  timeLimit: numberField({ minimum: 0.05, maximum: 60, description: "Seconds to look for a better plan, 0.6 when left out; the API stops after 1", example: 0.6 }).optional(),
 });
 
 export type PlatesInput = z.output<typeof platesInput>;

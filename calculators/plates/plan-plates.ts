@@ -41,7 +41,7 @@ export interface Planned {
   ended: "proved" | "looked" | "time";
 }
 
-const defaultSeconds = 0.7;
+const defaultSeconds = 0.6;
 const freshStarts = 60;
 
 /**
