@@ -82,7 +82,7 @@ export function SheetPage({ messages }: { messages: Messages }) {
         </div>
         <p className="field-hint">{t("sheet.actions.hint")}</p>
       </div>
-      <div className="sheet-desk">
+      <div className="sheet-desk" role="region" aria-label={t("sheet.actions.show")} tabIndex={0}>
         <SheetView sheet={sheet} code={code} />
       </div>
     </>

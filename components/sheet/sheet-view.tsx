@@ -66,7 +66,7 @@ export function SheetView({ sheet, code }: { sheet: Sheet; code: { path: string;
       {sections.flatMap((section) => (section.kind === "signOff" ? [] : [<SheetSection key={section.id} section={section} />]))}
       <div className="sheet-end">
         {sections.flatMap((section) => (section.kind === "signOff" ? [<SheetSection key={section.id} section={section} />] : []))}
-        <div className="sheet-code">
+        <div className="sheet-code" data-address={sheet.code.address}>
           <svg viewBox={`${-quietZone} ${-quietZone} ${codeSize} ${codeSize}`} width={`${Math.round(Math.min(210, Math.max(96, codeSize * 1.1)))}pt`} role="img" aria-label={sheet.code.title} shapeRendering="crispEdges">
             <path className="sheet-code-ink" d={code.path} />
           </svg>

@@ -134,11 +134,11 @@ function wordBlocks(set: Typesetter, { title, items }: Words, width: number): Bl
 }
 
 function signOffBlocks(set: Typesetter, { title, lines }: SignOff, width: number): Block[] {
-  const step = 40;
+  const step = 36;
   return [
     stack([
       headBlock(set, title, [], width),
-      { height: lines.length * step, place: (x, y) => lines.flatMap((line, index): Placed[] => [{ kind: "rule", x, y: y + (index + 1) * step - 13, width, thickness: 0.7, ink: "ink" }, set.text(x, y + (index + 1) * step - 3, line, "text", 8.5, "soft")]) },
+      { height: lines.length * step, place: (x, y) => lines.flatMap((line, index): Placed[] => [{ kind: "rule", x, y: y + (index + 1) * step - 12, width, thickness: 0.7, ink: "ink" }, set.text(x, y + (index + 1) * step - 3, line, "text", 8.5, "soft")]) },
     ]),
   ];
 }
