@@ -145,7 +145,7 @@ describe("when a link was last opened", () => {
     const [kept, old] = [await made(), await made()];
     const now = new Date();
     await ShortLink.update({ lastOpenedAt: new Date(now.getTime() - keptDays * day - 1) }, { where: { id: old.id } });
-    await ShortLink.update({ lastOpenedAt: new Date(now.getTime() - keptDays * day + 1000) }, { where: { id: kept.id } });
+    await ShortLink.update({ lastOpenedAt: new Date(now.getTime() - keptDays * day + 3_600_000) }, { where: { id: kept.id } });
     expect(await deleteUnopenedLinks(now)).toBe(1);
     expect(await ShortLink.findByPk(old.id)).toBeNull();
     expect(await ShortLink.findByPk(kept.id)).not.toBeNull();
