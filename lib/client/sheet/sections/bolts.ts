@@ -74,7 +74,7 @@ export function findingsSections({ t, answers, precision }: Context): Section[] 
 }
 
 /** The rule's figures, each with its clause and how far its source was read; what it does not state is said so. */
-export function ruleSection({ t, answers, precision }: Context): Table | null {
+export function ruleSection({ t, answers, precision, metric }: Context): Table | null {
   const told = answers.plates?.answer.rule ?? answers.bolts[0]?.answer.rule;
   if (told === undefined) return null;
   const id = ruleIds.find((known) => known === told.id);
@@ -83,7 +83,8 @@ export function ruleSection({ t, answers, precision }: Context): Table | null {
   const notStated = t("anchors.rule.notStated");
   type Figure = { clause: string | null; status: RuleText["diameter"]["status"]; source: string | null };
   const row = (label: string, value: string | null, { clause, status }: Figure) => [t(`anchors.figure.${label}`), value ?? notStated, clause ?? "", status === null ? "" : t(`common.sourceStatus.${status}`)];
-  const length = (text: string | null) => (text === null ? null : shownAs(text, precision));
+  // A limit is what its source says: in other units it is rounded, so the source's own figure stands beside it.
+  const length = (text: string | null) => (text === null ? null : metric && !text.endsWith("mm") ? `${shownAs(text, precision)} (${text})` : shownAs(text, precision));
   const { endMinimum } = rule;
   const rows = [
     row("diameter", length(rule.diameter.value), rule.diameter),
