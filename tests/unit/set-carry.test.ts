@@ -7,6 +7,7 @@ import { insetOperation } from "@/calculators/inset";
 import { platesOperation } from "@/calculators/plates";
 import { answerTo, inputFromQuery, type Operation } from "@/calculators/schema";
 import { squarenessOperation } from "@/calculators/squareness";
+import { preparePlates } from "@/components/calculators/plates/plates-fields";
 import { meant } from "@/lib/client/calculator/form-fields";
 import { adapterOf } from "@/lib/client/set/calculations";
 import { carriedInto, changedSince, mayTakeQuietly, takingPatch } from "@/lib/client/set/carry";
@@ -163,7 +164,13 @@ test("an L goes from its footprint to the best fit, and on to the bolts and plat
   expect(chalk.gives["line.cd"]).toMatch(/^192(\.0+)? in$/);
   expect(planOf(fitted, all).chalk).toHaveLength(6);
   const plates = carriedInto(fitted, all, at(fitted, "plates"))!;
-  expect(answerTo(platesOperation as Operation, inputFromQuery(Object.entries({ ...plates, "stock.0.length": "16 ft" }))).issues).toEqual([]);
+  expect(plates["inside.D"]).toBe("true");
+  expect(answerTo(platesOperation as Operation, preparePlates(inputFromQuery(Object.entries({ ...plates, "stock.0.length": "16 ft" })))).issues).toEqual([]);
+  // its chalk is pulled again as a footprint: six lines, then the diagonals that prove them
+  expect(at(fitted, "recheck").calculator).toBe("footprint");
+  const pulls = carriedInto(fitted, all, at(fitted, "recheck"))!;
+  expect([0, 5, 6].map((row) => pulls[`readings.${row}.from`]! + pulls[`readings.${row}.to`]!)).toEqual(["AB", "FA", "AC"]);
+  expect([pulls["readings.8.to"] !== undefined, pulls.inside, pulls.inset]).toEqual([true, "D", "0 in"]);
 });
 
 test("the bolts are done once every wall is", () => {

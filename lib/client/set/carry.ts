@@ -18,17 +18,26 @@ function chalkSizes(chalk: Texts, walls: readonly string[]): Texts {
   return ab === cd && bc === da ? { length: ab!, width: bc! } : {};
 }
 
+/** The pulls a recheck of any plan asks for: every chalk line, then the diagonals that prove its corners. Their readings are still to come. */
+function chalkPulls(chalk: Texts, walls: readonly string[]): Texts {
+  const checks = Object.keys(under(chalk, "check.")).map((name) => name.slice("check.".length));
+  const pulls = [...walls, ...(checks.length === 0 && walls.length === 4 ? ["ac", "bd"] : checks)].filter((name) => /^[a-z]{2}$/.test(name));
+  const rows = pulls.flatMap((name, index): [string, string][] => [[`readings.${index}.from`, name[0]!.toUpperCase()], [`readings.${index}.to`, name[1]!.toUpperCase()]]);
+  return { by: "readings", inset: "0 in", ...Object.fromEntries(rows), ...pick(chalk, { burn: "burn", inside: "inside" }) };
+}
+
 /** The fields that each calculation takes from those before it, with the values they have now; null while those have no answer. */
 const takers: Readonly<Record<string, Taker>> = {
   "concrete.level": ({ concrete }) => concrete && pick(concrete, { length: "length", width: "width" }),
   "chalk.inset": ({ concrete }) => concrete && pick(concrete, { length: "length", width: "width", burn: "burn", ...(concrete.tapered === "true" ? {} : { "slabDiagonals.ac": "ac", "slabDiagonals.bd": "bd" }) }),
   "chalk.fit": ({ concrete, concreteBy }) => {
     if (concrete === null) return null;
-    if (concreteBy === "footprint") return { ...under(concrete, "corners."), ...pick(concrete, { walk: "walk" }) };
+    if (concreteBy === "footprint") return { ...under(concrete, "corners."), ...pick(concrete, { walk: "walk", burn: "burn" }) };
     const sides = under(concrete, "sides.");
     return { ...(Object.keys(sides).length > 0 ? sides : pick(concrete, { length: "length", width: "width" })), ...pick(concrete, { "diagonals.ac": "ac", "diagonals.bd": "bd", burn: "burn" }) };
   },
   "recheck.squareness": ({ chalk, walls }) => chalk && { ...chalkSizes(chalk, walls), ...pick(chalk, { burn: "burn", "diagonals.ac": "ac", "diagonals.bd": "bd" }) },
+  "recheck.footprint": ({ chalk, walls }) => chalk && chalkPulls(chalk, walls),
   "bolts.anchors": ({ chalk }, { wall = "ab" }) => chalk && { ...pick(chalk, { "pieces.0.to": `line.${wall}`, inset: `inset.${wall}` }), mode: "check", ...(["ab", "bc", "cd", "da"].includes(wall) ? { wall } : {}) },
   "plates.plates": ({ chalk, bolts, walls }) =>
     chalk && {
@@ -38,6 +47,7 @@ const takers: Readonly<Record<string, Taker>> = {
           return [[`walls.${index}.name`, wall], [`walls.${index}.length`, chalk[`line.${wall}`] ?? ""] as [string, string], ...own];
         }),
       ),
+      ...Object.fromEntries((chalk.inside ?? "").split(", ").flatMap((corner) => (corner === "" ? [] : [[`inside.${corner}`, "true"]]))),
       ...pick(bolts(walls[0] ?? "ab") ?? {}, { rule: "rule", diameter: "diameter", plateWidth: "plateWidth" }),
     },
   "takeoff.takeoff": ({ plates }) => plates && Object.fromEntries(Object.entries(under(plates, "takeoff.")).map(([name, text]) => [name.slice("takeoff.".length), text])),

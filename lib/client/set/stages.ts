@@ -4,7 +4,7 @@ import type { SillSet } from "./schema";
 const plan = [
   { name: "concrete", main: ["squareness", "footprint"], beside: ["level"] },
   { name: "chalk", main: ["inset", "fit"], beside: [] },
-  { name: "recheck", main: ["squareness"], beside: [] },
+  { name: "recheck", main: ["squareness", "footprint"], beside: [] },
   { name: "bolts", main: ["anchors"], beside: [] },
   { name: "plates", main: ["plates"], beside: [] },
   { name: "takeoff", main: ["takeoff"], beside: [] },
@@ -33,10 +33,11 @@ export function stagesWith(available: readonly string[]): Stage[] {
   return plan.map(({ name, main, beside }) => ({ name, main: known(main), beside: known(beside) })).filter(({ main }) => main.length > 0);
 }
 
-/** The calculator in use for a stage: the one chosen, else the first. */
+/** The calculator in use for a stage: the one chosen, else the first; chalk lines of other than four walls are rechecked as a footprint. */
 export function chosenFor(set: SillSet, { name, main }: Stage): string {
   const chosen = set.choices[name];
-  return chosen !== undefined && main.includes(chosen) ? chosen : main[0]!;
+  if (chosen !== undefined && main.includes(chosen)) return chosen;
+  return name === "recheck" && main.includes("footprint") && wallsOf(set).length !== 4 ? "footprint" : main[0]!;
 }
 
 const rectangleWalls = ["ab", "bc", "cd", "da"];

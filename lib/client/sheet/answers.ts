@@ -26,6 +26,8 @@ export interface Answers {
   inset: Answered<InsetAnswer> | null;
   fit: Answered<FitAnswer> | null;
   recheck: Answered<SquarenessAnswer> | null;
+  /** The recheck of chalk lines that are no quadrilateral. */
+  repulled: Answered<FootprintAnswer> | null;
   /** By wall, in order. */
   bolts: readonly (Answered<CheckAnswer | LayoutAnswer> & { wall: string })[];
   plates: Answered<PlatesAnswer> | null;
@@ -53,7 +55,8 @@ export function answersOf(set: SillSet, stages: readonly Stage[], precision: Pre
     level: answer("concrete.level"),
     inset: main("chalk", "inset"),
     fit: main("chalk", "fit"),
-    recheck: answer("recheck.squareness"),
+    recheck: main("recheck", "squareness"),
+    repulled: main("recheck", "footprint"),
     bolts: (boltStage === undefined ? [] : slotsOf(set, boltStage)).flatMap(({ id, wall = "" }) => {
       const found = answer<CheckAnswer | LayoutAnswer>(id);
       return found === null ? [] : [{ ...found, wall }];

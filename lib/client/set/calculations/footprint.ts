@@ -1,5 +1,5 @@
 import type { FootprintAnswer } from "@/calculators/footprint";
-import { exactText, inchText, keyFigure, type Adapter } from "./adapter";
+import { exactText, inchText, keyFigure, typed, type Adapter } from "./adapter";
 
 type Placed = FootprintAnswer["corners"][number] & { x: number; y: number };
 
@@ -15,7 +15,8 @@ export const footprint: Adapter<FootprintAnswer> = {
     if (closure !== null && closure.oneIn !== null) return keyFigure("warn", "misses", { distance: closure.distance.text });
     return keyFigure("good", "closed", { corners: corners.length, perimeter: perimeter?.text ?? "" });
   },
-  gives: (answer) => ({
+  gives: (answer, asked) => ({
+    ...typed(asked, { burn: "burn" }),
     ...Object.fromEntries(placed(answer).flatMap(({ name, x, y }) => [[`corners.${name}.x`, inchText(x)], [`corners.${name}.y`, inchText(y)]])),
     ...Object.fromEntries(answer.lines.flatMap(({ side, length, chalk }) => [[`side.${side}`, exactText(length)], ...(chalk === null ? [] : [[`wanted.${side}`, exactText(chalk)]])])),
     walk: answer.lines.every(({ toward, chalk }) => toward !== null && chalk !== null) ? answer.lines.map(({ toward, chalk }) => `${toward} ${exactText(chalk!)}`).join(", ") : "",

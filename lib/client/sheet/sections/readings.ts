@@ -1,4 +1,4 @@
-import { parseLength, printLength, type Length } from "@/calculators/length";
+import { parseLength, printLength, type Length, type Precision } from "@/calculators/length";
 import type { LengthAnswer } from "@/calculators/schema/measure";
 import { byCorners, onTape, shownAs, unitOfInput, withLean, type Context } from "../context";
 import type { Table } from "../sheet";
@@ -8,7 +8,8 @@ type Shown = string | null;
 /** Each pull on concrete, what the chalk must read, and what it read: with the burn in, as the tape shows it. */
 export function readingsTable(context: Context): Table | null {
   const { t, answers, precision } = context;
-  const { square, footprint, inset, fit, recheck } = answers;
+  const { square, footprint, inset, fit, recheck, repulled } = answers;
+  const pullsOf = (asked: typeof footprint) => typedPulls(asked?.input, precision);
   const rows: { name: string; concrete: Shown; expected: Shown; chalk: Shown }[] = [];
   const shownReading = (reading: { reading: LengthAnswer | null; measured: LengthAnswer } | null | undefined): Shown => (reading === null || reading === undefined ? null : onTape(reading.reading ?? reading.measured, precision));
   const row = (name: string, concrete: Shown, expected: Shown, chalk: Shown) => {
@@ -25,10 +26,15 @@ export function readingsTable(context: Context): Table | null {
     const [ac, bd] = [typedChalk(inset?.input, "ac"), typedChalk(inset?.input, "bd")];
     row(t("sheet.readings.difference"), square?.answer.difference.text ?? null, null, recheck?.answer.difference.text ?? (ac === null || bd === null ? null : printLength(ac.minus(bd).magnitude(), precision)));
   } else {
-    const known = new Map(fit?.answer.checks.map(({ from, to, reading }) => [`${from}${to}`, reading]));
-    for (const { from, to, reading, chalk } of footprint.answer.checks) {
-      const expected = known.get(`${from}${to}`) ?? chalk?.reading;
-      row(byCorners(`${from}${to}`), onTape(reading, precision), expected === undefined ? null : onTape(expected, precision), null);
+    const [pulled, again] = [pullsOf(footprint), pullsOf(repulled)];
+    const known = new Map(fit?.answer.checks.map(({ from, to, reading }) => [pullName(from, to), reading]));
+    const proving = new Map(footprint.answer.checks.map((check) => [pullName(check.from, check.to), check]));
+    for (const name of new Set([...pulled.keys(), ...proving.keys(), ...known.keys(), ...again.keys()])) {
+      const check = proving.get(name);
+      const expected = known.get(name) ?? check?.chalk?.reading;
+      const [read, chalk] = [pulled.get(name), again.get(name)];
+      const concrete = read ?? (check === undefined || pulled.size > 0 ? null : onTape(check.reading, precision));
+      row(byCorners(name), concrete, expected === undefined ? null : onTape(expected, precision), chalk ?? null);
     }
   }
   if (rows.length === 0) return null;
@@ -40,9 +46,23 @@ export function readingsTable(context: Context): Table | null {
     id: "readings",
     title: t("sheet.readings.title"),
     note: burn === null || /^0\b/.test(burn) ? t("sheet.readings.plain") : t("sheet.readings.burned", { burn }),
-    columns: [{ text: t("sheet.readings.pull"), share: 3 }, ...columns.map((name) => ({ text: t(`sheet.readings.${footprint !== null && name === "concrete" ? "mustRead" : name}`), figure: true, share: 3.4 }))],
+    columns: [{ text: t("sheet.readings.pull"), share: 3 }, ...columns.map((name) => ({ text: t(`sheet.readings.${footprint?.answer.adjustment === null && name === "concrete" ? "mustRead" : name}`), figure: true, share: 3.4 }))],
     rows: rows.map((entry) => [entry.name, ...columns.map((name) => entry[name] ?? "")]),
   };
+}
+
+/** A pull is the same from either end. */
+const pullName = (from: string, to: string) => (from < to ? `${from}${to}` : `${to}${from}`);
+
+/** Pulls of a braced polygon as typed, burn included: by their corners, those between corners alone. */
+function typedPulls(input: Readonly<Record<string, unknown>> | undefined, precision: Precision): Map<string, string> {
+  const rows = Array.isArray(input?.readings) ? (input.readings as Record<string, unknown>[]) : [];
+  return new Map(
+    rows.flatMap(({ from, to, reading }): [string, string][] => {
+      if (input === undefined || typeof from !== "string" || typeof to !== "string" || typeof reading !== "string" || reading.trim() === "") return [];
+      return [[pullName(from.toUpperCase(), to.toUpperCase()), shownAs(reading, precision, unitOfInput(input), "inches")]];
+    }),
+  );
 }
 
 /** A chalk diagonal typed with the chalk lines, where no recheck says more. */
