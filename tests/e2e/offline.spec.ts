@@ -66,6 +66,15 @@ test("the job is done without signal, tapping from the first page on, and is the
   await expect(page.getByRole("textbox", { name: "Piece 1 ends" })).toHaveValue("335 1/8 in");
   await page.reload();
   await expect(page.getByRole("textbox", { name: "Piece 1 ends" })).toHaveValue("335 1/8 in");
+  // The plates are planned by a worker, which has to be there without signal too.
+  for (const name of ["plates", "takeoff", "marks"]) {
+    await stage(name);
+    await expect(page.locator(".verdict:not([data-tone=idle]) .verdict-title")).toBeVisible({ timeout: 30_000 });
+  }
+  if (!(await page.locator(".stage-rail").isVisible())) await page.locator(".set-place a").click();
+  // 27' 11 1/8" at 16 in on centre: marks at 15 1/4, 31 1/4 … the 20th at 319 1/4 is the last before the end
+  await expect(page.locator('.stage-rail a[href*="stage=marks"]')).toContainText("20 marks");
+  await expect(page.locator(".set-plan svg.plan")).toHaveAccessibleName(/plate pieces.*joist marks/);
 });
 
 test("a page that needs signal says so in its language, and the way on works", async ({ page, context }) => {
