@@ -26,6 +26,7 @@ await lifecycle(async (keep) => {
   // What drives the browser is a package itself, and is there only now.
   const { firstLoad } = await import("../bench/first-load.mjs");
   const { keyPresses } = await import("../bench/key-press.mjs");
+  const { longestTask } = await import("../bench/longest-task.mjs");
   await step("Packages from Debian", () => ensureSystemPackages(["mariadb", "redis", "chromium"]));
   const folder = await throwawayFolder(keep);
   const { environment } = await throwawayServices(folder, keep);
@@ -52,6 +53,7 @@ await lifecycle(async (keep) => {
     await measure("Every public page", () => staticPages(site));
     await measure("First load of each calculator", () => firstLoad(site, examples));
     await measure("Key press to next paint", () => keyPresses(site, examples));
+    await measure("Longest task while plates are planned", () => longestTask(site));
     await measure("Requests, limiter off", () => requestsOverEcho(site, examples, "limiter off"));
     await measure("Batches", () => batchOverSingle(site, examples));
   });

@@ -5,6 +5,7 @@ import type { PlatesAnswer } from "@/calculators/plates";
 import { pixel } from "@/components/drawing/plan-geometry";
 import { LengthText } from "@/components/ui/length-text";
 import { useTranslate } from "@/lib/client/i18n/messages-context";
+import { useFold } from "./use-fold";
 
 const box = 360;
 const height = 26;
@@ -12,13 +13,14 @@ const height = 26;
 /** Every board with the pieces cut from it, drawn to one scale and said beside. */
 export function CutList({ answer }: { answer: PlatesAnswer }) {
   const t = useTranslate();
+  const [boards, more] = useFold(answer.boards, 16);
   const longest = Math.max(...answer.boards.map(({ stock }) => stock.in), 1);
   return (
     <section aria-labelledby="cut-title">
       <h2 id="cut-title">{t("plates.cut.title")}</h2>
       <p>{t("plates.cut.intro")}</p>
       <ol className="cut-list">
-        {answer.boards.map((board, index) => (
+        {boards.map((board, index) => (
           <li key={index}>
             <p>
               <b>{t("plates.cut.board", { number: index + 1 })}</b> <LengthText text={board.stock.text} />
@@ -35,6 +37,7 @@ export function CutList({ answer }: { answer: PlatesAnswer }) {
           </li>
         ))}
       </ol>
+      {more}
     </section>
   );
 }

@@ -1,20 +1,15 @@
 "use client";
 
-import { useState } from "react";
 import type { PlatesAnswer } from "@/calculators/plates";
-import { Button } from "@/components/ui/button";
 import { LengthText } from "@/components/ui/length-text";
 import { useTranslate } from "@/lib/client/i18n/messages-context";
-
-/** Pieces shown at once; a house's holes are many rows, and most people bore one wall at a time. */
-const atOnce = 40;
+import { useFold } from "./use-fold";
 
 /** Each piece's holes: running from the end nearer the wall's first corner, and across from the outer edge. */
 export function PieceHoles({ answer }: { answer: PlatesAnswer }) {
   const t = useTranslate();
-  const [all, setAll] = useState(false);
+  const [pieces, more] = useFold(answer.pieces, 16);
   if (answer.walls.length === 0) return null;
-  const pieces = all ? answer.pieces : answer.pieces.slice(0, atOnce);
   return (
     <section aria-labelledby="holes-title">
       <h2 id="holes-title">{t("plates.holes.title")}</h2>
@@ -47,11 +42,7 @@ export function PieceHoles({ answer }: { answer: PlatesAnswer }) {
           ))}
         </table>
       </div>
-      {pieces.length < answer.pieces.length ? (
-        <Button kind="ghost" className="no-print" onClick={() => setAll(true)}>
-          {t("plates.holes.more", { count: answer.pieces.length - pieces.length })}
-        </Button>
-      ) : null}
+      {more}
     </section>
   );
 }

@@ -1,6 +1,6 @@
 "use client";
 
-import { useState, useSyncExternalStore, type ReactNode } from "react";
+import { useDeferredValue, useState, useSyncExternalStore, type ReactNode } from "react";
 import type { platesAnswer, PlatesAnswer } from "@/calculators/plates";
 import { calculatorAddress } from "@/lib/client/calculator/calculator-address";
 import { useCalculator, type Initial } from "@/lib/client/calculator/use-calculator";
@@ -22,19 +22,21 @@ export function PlatesCalculator({ header, initial }: { header: ReactNode; initi
   const form = useCalculator<typeof platesAnswer>({ name: "plates", load: () => Promise.resolve(planner.loaded), isLength: isLengthField, defaults, prepare: plan.prepare, initial });
   // While the next plan is worked out the last one stays, unless what was typed cannot be planned.
   const shown = form.answer ?? (form.issues.length > 0 ? null : plan.last);
+  // A plan of a whole house is much to draw: it is drawn when there is time, and a key pressed meanwhile comes first.
+  const drawn = useDeferredValue(shown);
   return (
     <CalculatorWorkspace
       form={form}
       name="plates"
       operation="plates"
       header={header}
-      drawing={<PlatesDrawing answer={shown} />}
+      drawing={<PlatesDrawing answer={drawn} />}
       fields={<PlatesInputs form={form} />}
       verdict={<PlatesVerdict answer={shown} busy={plan.busy} />}
       results={
         <>
           {plan.busy ? <PlanProgress plan={plan} stop={form.answer === null ? null : planner.stop} /> : null}
-          {shown === null ? null : <PlatesResults answer={shown} />}
+          {drawn === null ? null : <PlatesResults answer={drawn} />}
         </>
       }
       carries={form.answer === null ? [] : carriesOf(form.answer, t)}

@@ -9,6 +9,7 @@ import { CutList } from "./cut-list";
 import { PieceHoles } from "./piece-holes";
 import { PlateFindings } from "./plate-findings";
 import { percent } from "./plates-verdict";
+import { useFold } from "./use-fold";
 
 interface Part {
   answer: PlatesAnswer;
@@ -57,7 +58,8 @@ export function PlatesResults({ answer }: Part) {
 
 function AnchorTable({ answer }: Part) {
   const t = useTranslate();
-  if (answer.addedAnchors.length === 0) return null;
+  const [anchors, more] = useFold(answer.addedAnchors, 24);
+  if (anchors.length === 0) return null;
   return (
     <section aria-labelledby="added-title">
       <h2 id="added-title">{t("plates.added.title")}</h2>
@@ -73,7 +75,7 @@ function AnchorTable({ answer }: Part) {
             </tr>
           </thead>
           <tbody>
-            {answer.addedAnchors.map(({ wall, piece, station, running, window }, index) => (
+            {anchors.map(({ wall, piece, station, running, window }, index) => (
               <tr key={`${wall}${index}`}>
                 <th scope="row">{piece}</th>
                 <td className="figure">
@@ -88,13 +90,15 @@ function AnchorTable({ answer }: Part) {
           </tbody>
         </table>
       </div>
+      {more}
     </section>
   );
 }
 
 function JointTable({ answer }: Part) {
   const t = useTranslate();
-  if (answer.joints.length === 0) return null;
+  const [joints, more] = useFold(answer.joints, 24);
+  if (joints.length === 0) return null;
   return (
     <section aria-labelledby="joints-title">
       <h2 id="joints-title">{t("plates.joints.title")}</h2>
@@ -109,7 +113,7 @@ function JointTable({ answer }: Part) {
             </tr>
           </thead>
           <tbody>
-            {answer.joints.map(({ at, window, before, after }) => (
+            {joints.map(({ at, window, before, after }) => (
               <tr key={before}>
                 <th scope="row">{t("plates.joints.pair", { before, after })}</th>
                 <td className="figure">
@@ -121,6 +125,7 @@ function JointTable({ answer }: Part) {
           </tbody>
         </table>
       </div>
+      {more}
     </section>
   );
 }
