@@ -32,8 +32,11 @@ export function useSets(): SetsState {
     () => setStore().get(),
     () => nothing,
   );
-  // A phone may clear what a site keeps unless it is asked not to; the answer changes nothing here.
-  useEffect(() => void navigator.storage?.persist?.().catch(() => false), []);
+  // A phone may clear what a site keeps unless it is asked not to: once there is something to keep. The answer changes nothing here.
+  const hasSets = (state.sets?.length ?? 0) > 0;
+  useEffect(() => {
+    if (hasSets) void navigator.storage?.persist?.().catch(() => false);
+  }, [hasSets]);
   return state;
 }
 
