@@ -1,6 +1,7 @@
 "use client";
 
-import { useState, type ReactNode } from "react";
+import { useEffect, useState, type ReactNode } from "react";
+import { flushSync } from "react-dom";
 import { Button } from "@/components/ui/button";
 import { useTranslate } from "@/lib/client/i18n/messages-context";
 
@@ -8,6 +9,11 @@ import { useTranslate } from "@/lib/client/i18n/messages-context";
 export function useFold<Item>(items: readonly Item[], atOnce: number): [shown: readonly Item[], more: ReactNode] {
   const t = useTranslate();
   const [all, setAll] = useState(false);
+  useEffect(() => {
+    const unfold = () => flushSync(() => setAll(true)); // paper has no button
+    addEventListener("beforeprint", unfold);
+    return () => removeEventListener("beforeprint", unfold);
+  }, []);
   const hidden = all ? 0 : Math.max(0, items.length - atOnce);
   if (hidden === 0) return [items, null];
   return [
