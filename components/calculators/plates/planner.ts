@@ -5,12 +5,16 @@ import type { PlanMessage, PlanRequest } from "./plates-worker";
 
 type Prepare = (input: Record<string, unknown>) => Record<string, unknown>;
 
+/** How far the search is; changes many times a second. */
+export interface PlanProgressState {
+  stage: 1 | 2;
+  share: number;
+}
+
+/** What the page is drawn from; changes only when a search begins, answers or ends. */
 export interface PlannerState {
   /** A plan is being looked for: the first for what is typed, or a better one. */
   busy: boolean;
-  stage: 1 | 2;
-  share: number;
-  cost: number | null;
   /** The last answer there was, to stay on screen while the next is worked out. */
   last: PlatesAnswer | null;
   /** A new one whenever an answer has come, so that the form asks again. */
@@ -26,8 +30,9 @@ const defaultSeconds = 4;
  * `stop` keeps the best so far. Where there is no worker the plan is made here, in a short time.
  */
 export function createPlanner() {
-  let state: PlannerState = { busy: false, stage: 1, share: 0, cost: null, last: null, prepare: (input) => preparePlates(input) };
+  let state: PlannerState = { busy: false, last: null, prepare: (input) => preparePlates(input) };
   const initial = state;
+  let progress: PlanProgressState = { stage: 1, share: 0 };
   const listeners = new Set<() => void>();
   let worker: Worker | null = null;
   let working = false;
@@ -37,6 +42,10 @@ export function createPlanner() {
 
   function set(next: Partial<PlannerState>): void {
     state = { ...state, ...next };
+    tell();
+  }
+
+  function tell(): void {
     for (const listener of listeners) listener();
   }
 
@@ -50,14 +59,17 @@ export function createPlanner() {
     if (key !== wanted) return;
     answers.clear();
     answers.set(key, answered);
-    set({ busy: !final, share: final ? 1 : state.share, last: answered.answer, prepare: (input) => preparePlates(input) });
+    set({ busy: !final, last: answered.answer, prepare: (input) => preparePlates(input) });
   }
 
   function hear({ data }: MessageEvent<PlanMessage>): void {
     if (data.kind === "answer") {
       if (data.final) working = false;
       keep(data.key, data.answered, data.final);
-    } else if (data.key === wanted) set({ stage: data.stage, share: data.share, cost: data.cost });
+    } else if (data.key === wanted) {
+      progress = { stage: data.stage, share: data.share };
+      tell();
+    }
   }
 
   async function planHere(key: string, request: unknown): Promise<void> {
@@ -67,7 +79,8 @@ export function createPlanner() {
 
   function start(key: string, request: unknown, seconds: number): void {
     if (working) drop();
-    set({ busy: true, stage: 1, share: 0, cost: null });
+    progress = { stage: 1, share: 0 };
+    set({ busy: true });
     try {
       if (worker === null) {
         worker = new Worker(new URL("./plates-worker.ts", import.meta.url), { type: "module" });
@@ -88,6 +101,7 @@ export function createPlanner() {
   return {
     get: () => state,
     getInitial: () => initial,
+    progress: () => progress,
     subscribe(listener: () => void) {
       listeners.add(listener);
       return () => {
@@ -120,3 +134,5 @@ export function createPlanner() {
     },
   };
 }
+
+export type Planner = ReturnType<typeof createPlanner>;

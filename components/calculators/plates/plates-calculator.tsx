@@ -35,7 +35,7 @@ export function PlatesCalculator({ header, initial }: { header: ReactNode; initi
       verdict={<PlatesVerdict answer={shown} busy={plan.busy} />}
       results={
         <>
-          {plan.busy ? <PlanProgress plan={plan} stop={form.answer === null ? null : planner.stop} /> : null}
+          {plan.busy ? <PlanProgress planner={planner} stop={form.answer === null ? null : planner.stop} /> : null}
           {drawn === null ? null : <PlatesResults answer={drawn} />}
         </>
       }

@@ -1,5 +1,6 @@
 "use client";
 
+import { memo } from "react";
 import type { platesAnswer } from "@/calculators/plates";
 import { LengthField } from "@/components/length-field/length-field";
 import { CheckRow } from "@/components/ui/check-row";
@@ -18,8 +19,14 @@ export type PlatesForm = ReturnType<typeof useCalculator<typeof platesAnswer>>;
 
 const times = ["1", "4", "20"] as const;
 
+/** What the fields are drawn from. A better plan that comes in changes none of it, and forty walls are much to draw again. */
+const isSame = (before: PlatesForm, after: PlatesForm) =>
+  before.fields === after.fields && before.unit === after.unit && before.precision === after.precision && before.asked === after.asked && before.problems.map(({ text }) => text).join() === after.problems.map(({ text }) => text).join();
+
 /** Walls, or pieces for the cut list alone; boards to cut from; saw, rule and plate. */
-export function PlatesInputs({ form }: { form: PlatesForm }) {
+export const PlatesInputs = memo(Inputs, (before, after) => isSame(before.form, after.form));
+
+function Inputs({ form }: { form: PlatesForm }) {
   const t = useTranslate();
   const planFrom = planFromOf(form.value);
   const isTyped = (...names: string[]) => names.some((name) => form.value(name) !== "");

@@ -1,10 +1,11 @@
 "use client";
 
+import { useSyncExternalStore } from "react";
 import type { PlatesAnswer } from "@/calculators/plates";
 import { Button } from "@/components/ui/button";
 import { Verdict } from "@/components/ui/verdict";
 import { useTranslate } from "@/lib/client/i18n/messages-context";
-import type { PlannerState } from "./planner";
+import type { Planner } from "./planner";
 
 /** Boards, pieces and added anchors in a line; what is proved of them below. */
 export function PlatesVerdict({ answer, busy }: { answer: PlatesAnswer | null; busy: boolean }) {
@@ -25,8 +26,10 @@ export function PlatesVerdict({ answer, busy }: { answer: PlatesAnswer | null; b
 export const percent = (gap: number) => (gap < 0.1 ? Math.ceil(gap * 1000) / 10 : Math.ceil(gap * 100));
 
 /** How far the search is, and a way to take the best so far. */
-export function PlanProgress({ plan, stop }: { plan: PlannerState; stop: (() => void) | null }) {
+export function PlanProgress({ planner, stop }: { planner: Planner; stop: (() => void) | null }) {
   const t = useTranslate();
+  // Listened to here alone: what moves many times a second must not draw the form again.
+  const plan = useSyncExternalStore(planner.subscribe, planner.progress, planner.progress);
   return (
     <div className="plates-progress no-print">
       <label>

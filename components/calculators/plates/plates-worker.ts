@@ -9,7 +9,7 @@ export interface PlanRequest {
 }
 
 export type PlanMessage =
-  | { key: string; kind: "progress"; stage: 1 | 2; share: number; cost: number | null }
+  | { key: string; kind: "progress"; stage: 1 | 2; share: number }
   /** An answer; `final` when no better one will follow. */
   | { key: string; kind: "answer"; answered: Answered<PlatesAnswer>; final: boolean };
 
@@ -30,10 +30,10 @@ addEventListener("message", ({ data }: MessageEvent<PlanRequest>) => {
       const answer = planSill(
         { ...parsed.data, timeLimit: time },
         {
-          onProgress: ({ stage, share, cost }) => {
+          onProgress: ({ stage, share }) => {
             if (performance.now() - told < progressEvery) return;
             told = performance.now();
-            tell({ key, kind: "progress", stage, share: share * (time / seconds), cost: cost === undefined || !Number.isFinite(cost) ? null : cost });
+            tell({ key, kind: "progress", stage, share: share * (time / seconds) });
           },
         },
       );
