@@ -74,7 +74,7 @@ function JoistMark({ x, width, isEnd, hit, number }: { x: number; width: number;
     <g>
       {isEnd ? <rect x={x} y="0" width={width} height={plate} fill="var(--timber-edge)" opacity="0.55" /> : null}
       <path d={`M${x} -6V${plate}`} stroke={colour} strokeWidth="2.2" />
-      <path d={`M${x + 2} ${plate / 2 - 5}l9 10m0-10l-9 10`} stroke={colour} strokeWidth="1.8" />
+      {isEnd ? null : <path d={`M${x + 2} ${plate / 2 - 5}l9 10m0-10l-9 10`} stroke={colour} strokeWidth="1.8" />}
       {number === null ? null : (
         <text x={x + 4} y="-10" textAnchor="middle" className={hit ? "num small out" : "num small"}>
           {number}
