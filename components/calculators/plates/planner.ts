@@ -66,6 +66,9 @@ export function createPlanner() {
     if (data.kind === "answer") {
       if (data.final) working = false;
       keep(data.key, data.answered, data.final);
+    } else if (data.kind === "stands") {
+      working = false;
+      if (data.key === wanted) set({ busy: false });
     } else if (data.key === wanted) {
       progress = { stage: data.stage, share: data.share };
       tell();
