@@ -163,9 +163,8 @@ for corner in range(6):
         assert abs(offset[(side, corner)] * 16 % 1 - 0.5) > 1e-3, "too near a tie to be told from outside"
         offsets[NAMES[corner]][list(CHALK)[side]] = feet(value) + ("" if lean == "exact" else f" {lean}")
 
-checks = {}
-for name in ("AC", "AD", "AE", "BD", "BE", "BF", "CE", "CF", "DF"):
-    checks[name] = inches(pull(name, plan) + BURN)
+# What the tape must read on the chalk between any two corners, burn included.
+chalk_pulls = {a + b: inches(pull(a + b, plan) + BURN) for a, b in combinations(NAMES, 2)}
 
 # --- 3. Bolts as poured, from the chalk: station, then offset.
 BOLTS = {
@@ -327,7 +326,7 @@ print(json.dumps({
     "worst": feet(worst),
     "offsets": offsets,
     "lines": {wall: feet(long) for wall, long in CHALK.items()},
-    "checks": checks,
+    "chalkPulls": chalk_pulls,
     "bolts": BOLTS,
     "stations": {wall: [float(s) for s in list_] for wall, list_ in station.items()},
     "across": {wall: [float(s) for s in list_] for wall, list_ in across.items()},

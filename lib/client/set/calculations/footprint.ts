@@ -20,7 +20,7 @@ export const footprint: Adapter<FootprintAnswer> = {
     ...Object.fromEntries(placed(answer).flatMap(({ name, x, y }) => [[`corners.${name}.x`, inchText(x)], [`corners.${name}.y`, inchText(y)]])),
     ...Object.fromEntries(answer.lines.flatMap(({ side, length, chalk }) => [[`side.${side}`, exactText(length)], ...(chalk === null ? [] : [[`wanted.${side}`, exactText(chalk)]])])),
     walk: answer.lines.every(({ toward, chalk }) => toward !== null && chalk !== null) ? answer.lines.map(({ toward, chalk }) => `${toward} ${exactText(chalk!)}`).join(", ") : "",
-    ...(answer.corners.length === 4 ? { length: exactText(answer.lines[0]!.length), width: exactText(answer.lines[3]!.length) } : {}),
+    ...(answer.lines.length === 4 ? { length: exactText(answer.lines[0]!.length), width: exactText(answer.lines[3]!.length) } : {}),
   }),
   layers(answer) {
     const corners = placed(answer);
