@@ -31,7 +31,13 @@ const byCorners = (wall: string) => [...wall.toUpperCase()].join("-");
 
 const verdict = (page: Page) => page.locator(".verdict-title");
 const field = (page: Page, name: string) => page.getByRole("textbox", { name, exact: true });
-const pick = (page: Page, name: string) => page.getByRole("radio", { name, exact: true }).first().check({ force: true });
+
+/** A choice of the set goes by its address, so it is checked a moment after the click. */
+async function pick(page: Page, name: string): Promise<void> {
+  const radio = page.getByRole("radio", { name, exact: true }).first();
+  await radio.click({ force: true });
+  await expect(radio).toBeChecked();
+}
 
 test.use({ actionTimeout: 10_000 });
 

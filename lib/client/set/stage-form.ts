@@ -20,12 +20,16 @@ function formOf({ fields, unit, precision }: Calculation): FormState {
   return form;
 }
 
-/** What must change for the stored calculation to say what the form says; blank fields go. */
+/** A field of a numbered row: `bolts.3.station`, `pieces.0`. */
+const inRow = (name: string) => /\.\d+(?:\.|$)/.test(name);
+
+/** What must change for the stored calculation to say what the form says. Blank fields go, save those of rows: a row just added is there before anything is typed in it. */
 export function formPatch(before: FormState, after: FormState): CalculationPatch {
   const fields: Record<string, string | null> = {};
   for (const name of new Set([...Object.keys(before.fields), ...Object.keys(after.fields)])) {
-    const [was, is] = [before.fields[name] ?? "", after.fields[name] ?? ""];
-    if (was !== is) fields[name] = is === "" ? null : is;
+    const [was = null, text = null] = [before.fields[name], after.fields[name]];
+    const is = text === "" && !inRow(name) ? null : text;
+    if (was !== is) fields[name] = is;
   }
   return {
     ...(Object.keys(fields).length === 0 ? {} : { fields }),
