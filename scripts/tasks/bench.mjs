@@ -26,6 +26,7 @@ await lifecycle(async (keep) => {
   // What drives the browser is a package itself, and is there only now.
   const { firstLoad } = await import("../bench/first-load.mjs");
   const { keyPresses } = await import("../bench/key-press.mjs");
+  const { manyBolts } = await import("../bench/many-bolts.mjs");
   const { longestTask } = await import("../bench/longest-task.mjs");
   await step("Packages from Debian", () => ensureSystemPackages(["mariadb", "redis", "chromium"]));
   const folder = await throwawayFolder(keep);
@@ -54,6 +55,7 @@ await lifecycle(async (keep) => {
     await measure("First load of each calculator", () => firstLoad(site, examples));
     await measure("Key press to next paint", () => keyPresses(site, examples));
     await measure("Longest task while plates are planned", () => longestTask(site));
+    await measure("A set with 200 bolts", () => manyBolts(site));
     await measure("Requests, limiter off", () => requestsOverEcho(site, examples, "limiter off"));
     await measure("Batches", () => batchOverSingle(site, examples));
   });
@@ -61,5 +63,6 @@ await lifecycle(async (keep) => {
   await withSite(1_000_000, (site) => measure("Requests, limiter on", () => requestsOverEcho(site, examples, "limiter on")));
   await measure("The parser", () => fromTypescript("parser.ts"));
   await measure("Plates", () => fromTypescript("plates.ts"));
+  await measure("Solvers against size", () => fromTypescript("solvers.ts"));
   printTable(rows);
 });
