@@ -1,5 +1,5 @@
 import { z } from "zod";
-import { calculatorInput, lengthField } from "../schema";
+import { calculatorInput, lengthField, orRequired } from "../schema";
 
 export const sides = ["ab", "bc", "cd", "da"] as const;
 export type Side = (typeof sides)[number];
@@ -10,17 +10,14 @@ const veneerOf = (side: string) => lengthField({ sign: "not-negative", descripti
 const reading = (description: string, example: string) => lengthField({ description, example });
 const burn = (description: string) => lengthField({ sign: "not-negative", description, example: "1" });
 
-/** One value for all sides, or one each. `required` where nothing came, else what was expected. */
-const orCode = (code: string) => ({ error: (issue: { input?: unknown }) => (issue.input === undefined ? "required" : code) });
-
 export const insetInput = calculatorInput({
   length: lengthField({ description: "Slab edges AB and CD", example: "28 ft" }),
   width: lengthField({ description: "Slab edges BC and DA", example: "40 ft" }),
   inset: z
-    .union([insetOf("every side"), z.strictObject({ ab: insetOf("AB"), bc: insetOf("BC"), cd: insetOf("CD"), da: insetOf("DA") })], orCode("expected-length"))
+    .union([insetOf("every side"), z.strictObject({ ab: insetOf("AB"), bc: insetOf("BC"), cd: insetOf("CD"), da: insetOf("DA") })], orRequired("expected-length"))
     .meta({ description: "From slab edge to chalk line, square to the edge: one for all sides, or one each" }),
   veneer: z
-    .union([veneerOf("every side"), z.strictObject({ ab: veneerOf("AB").optional(), bc: veneerOf("BC").optional(), cd: veneerOf("CD").optional(), da: veneerOf("DA").optional() })], orCode("expected-length"))
+    .union([veneerOf("every side"), z.strictObject({ ab: veneerOf("AB").optional(), bc: veneerOf("BC").optional(), cd: veneerOf("CD").optional(), da: veneerOf("DA").optional() })], orRequired("expected-length"))
     .optional()
     .meta({ description: "Setback for masonry veneer, added to the inset: one for all sides, or for some" }),
   burn: burn("Where the tape was held: taken off every reading").optional(),

@@ -6,7 +6,9 @@ import { Length, LengthError, lengthUnits, precisions, readLength, ReadLength, t
  * The zod pieces that all calculators share. A union's message is its issue code: `required`, or what was expected.
  * Text is accepted beside numbers and truth values, since a form and an address can send nothing else.
  */
-const orRequired = (code: string) => ({ error: (issue: { input?: unknown }) => (issue.input === undefined ? "required" : code) });
+
+/** The error of a union: `required` where nothing came, else `code`. */
+export const orRequired = (code: string) => ({ error: (issue: { input?: unknown }) => (issue.input === undefined ? "required" : code) });
 
 interface LengthFieldOptions {
   /** `positive` by default; `any` for offsets, which may be negative. */

@@ -1,10 +1,8 @@
 "use client";
 
-import type { ReactNode } from "react";
 import type { PlatesAnswer } from "@/calculators/plates";
-import { LengthText } from "@/components/ui/length-text";
 import { useTranslate } from "@/lib/client/i18n/messages-context";
-import { statusText } from "../anchors/status-text";
+import { FindingItem } from "../anchors/finding-item";
 
 type Finding = PlatesAnswer["findings"][number];
 
@@ -17,28 +15,21 @@ export function PlateFindings({ answer }: { answer: PlatesAnswer }) {
       <h2 id="findings-title">{t("plates.findings.title")}</h2>
       <ul className="findings">
         {answer.findings.map((finding, index) => (
-          <li key={index} data-tone="out">
-            <p>
-              <b>
-                {finding.wall.toUpperCase()}, {t(`anchors.code.${finding.code}`)}.
-              </b>{" "}
-              {t.rich(sentenceKey(finding), valuesOf(finding, answer))}
-            </p>
-            <p>{t(`anchors.remedy.${finding.remedy}`)}</p>
-            <p className="findings-note">{[finding.clause, statusText(finding.status, t)].filter(Boolean).join(", ")}</p>
-          </li>
+          <FindingItem
+            key={index}
+            finding={finding}
+            title={`${finding.wall.toUpperCase()}, ${t(`anchors.code.${finding.code}`)}`}
+            piece={finding.piece ?? ""}
+            station={stationOf(finding, answer)}
+          />
         ))}
       </ul>
     </section>
   );
 }
 
-function sentenceKey({ code, next, bolt }: Finding): string {
-  return `anchors.findings.${code === "spacing" && (next === null || bolt === null) ? "spacing-end" : code}`;
-}
-
-function valuesOf({ wall, piece, bolt, next, limit, actual }: Finding, answer: PlatesAnswer): Record<string, ReactNode> {
-  const shown = (value: Finding["limit"]) => (value === null ? "" : typeof value === "number" ? value : <LengthText text={value.text} />);
-  const hole = answer.pieces.filter((candidate) => candidate.wall === wall).flatMap(({ holes }) => holes).find((candidate) => candidate.bolt === bolt);
-  return { piece: piece ?? "", bolt: bolt === null ? "" : bolt + 1, next: next === null ? "" : next + 1, station: hole === undefined ? "" : <LengthText text={hole.station.text} />, limit: shown(limit), actual: shown(actual) };
+/** Where the finding's bolt stands on its wall, from the hole bored for it. */
+function stationOf({ wall, bolt }: Finding, answer: PlatesAnswer): string | undefined {
+  const holes = answer.pieces.filter((piece) => piece.wall === wall).flatMap((piece) => piece.holes);
+  return holes.find((hole) => hole.bolt === bolt)?.station.text;
 }
